@@ -33,6 +33,7 @@ function removeDrafts(dataFolder) {
   const parent = dirname(dataFolder);
   if (!existsSync(parent)) return;
   for (const name of readdirSync(parent)) {
-    if (name.startsWith(`${basename(dataFolder)}.new-`)) rmSync(join(parent, name), { recursive: true, force: true });
+    if (name.startsWith(`${basename(dataFolder)}.new-`))
+      rmSync(join(parent, name), { recursive: true, force: true });
   }
 }

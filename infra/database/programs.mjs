@@ -2,7 +2,13 @@ import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 
 /** Debian keeps servers in sbin, which an ordinary account often has not in its path. */
-const folders = [...(process.env.PATH ?? '').split(':'), '/usr/local/sbin', '/usr/sbin', '/usr/local/bin', '/usr/bin'];
+const folders = [
+  ...(process.env.PATH ?? '').split(':'),
+  '/usr/local/sbin',
+  '/usr/sbin',
+  '/usr/local/bin',
+  '/usr/bin',
+];
 
 /** The full path of a program of MariaDB (`mariadbd`, `mariadb-install-db`, `mariadb-dump`), or undefined. */
 export function findProgram(name) {

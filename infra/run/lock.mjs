@@ -20,7 +20,8 @@ async function take(path, until) {
   mkdirSync(dirname(path), { recursive: true });
   while (!tryTake(path)) {
     if (isAbandoned(path)) rmSync(path, { force: true });
-    else if (Date.now() > until) throw new Error(`${path} is held by process ${holderOf(path)}; waited too long`);
+    else if (Date.now() > until)
+      throw new Error(`${path} is held by process ${holderOf(path)}; waited too long`);
     else await pause(50);
   }
 }
