@@ -4,7 +4,10 @@ export default {
   roots: ['<rootDir>/src'],
   testMatch: ['**/*.spec.ts'],
   transform: {
-    '^.+\\.ts$': ['@swc/jest', { jsc: { target: 'es2022', parser: { syntax: 'typescript' } }, module: { type: 'commonjs' } }],
+    '^.+\\.ts$': [
+      '@swc/jest',
+      { jsc: { target: 'es2022', parser: { syntax: 'typescript' } }, module: { type: 'commonjs' } },
+    ],
   },
   moduleNameMapper: { '^(\\.{1,2}/.*)\\.js$': '$1' },
 };
