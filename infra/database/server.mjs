@@ -27,7 +27,7 @@ export function serverFiles(folder) {
  * when missing; the port is remembered. A server killed last time recovers by itself.
  *
  * @param durability 'durable' or 'fast', see settings.mjs
- * @returns {Promise<{ port: number, pid: number, credentials: object, started: boolean }>}
+ * @returns `{ port, pid, credentials, started }`, and when it was started now also `{ child, logFile, stop }`
  */
 export async function startServer(folder, { durability }) {
   const files = serverFiles(folder);
@@ -39,8 +39,16 @@ export async function startServer(folder, { durability }) {
   await ensureDataFolder(files.dataFolder);
   writePrivateFile(files.initFile, `${accountStatements(credentials).join('\n')}\n`);
   const port = await rememberedOrFreePort(readJson(files.state)?.port);
-  const pid = await launch(files, port, durability);
-  return { port, pid, credentials, started: true };
+  const child = await launch(files, port, durability);
+  return {
+    port,
+    pid: child.pid,
+    child,
+    logFile: files.log,
+    credentials,
+    started: true,
+    stop: () => stopServer(folder),
+  };
 }
 
 /** The running server of the folder as `{ port, pid }`, or undefined. Only a process on this very data folder counts. */
@@ -84,7 +92,7 @@ async function launch(files, port, durability) {
   child.once('error', () => (gone = true));
   child.unref();
   writePrivateJson(files.state, { port, pid: child.pid });
-  if (await waitForGreeting(port, { withinMs: 120_000, hasGivenUp: () => gone })) return child.pid;
+  if (await waitForGreeting(port, { withinMs: 120_000, hasGivenUp: () => gone })) return child;
   throw new Error(`The database did not start. The end of ${files.log}:\n${lastLines(files.log)}`);
 }
 

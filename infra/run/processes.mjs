@@ -6,19 +6,31 @@ import { setTimeout as pause } from 'node:timers/promises';
  * empty command line and so counts as gone.
  */
 export function commandLineOf(pid) {
-  try {
-    return readFileSync(`/proc/${pid}/cmdline`, 'utf8').replaceAll('\0', ' ').trim();
-  } catch {
-    return '';
-  }
+  return readProc(`${pid}/cmdline`).replaceAll('\0', ' ').trim();
 }
 
 /**
- * Whether the process is the one we started. Numbers of dead processes are given out again, so a remembered number
- * alone never justifies a signal: its command line must also hold the mark, which is a path inside this clone.
+ * A text that no other process, past or future, shares: numbers of processes are given out again, also after a restart
+ * of the machine. '' when there is no such process or it is a zombie.
+ */
+export function identityOf(pid) {
+  if (commandLineOf(pid) === '') return '';
+  // The program's name stands in parentheses and may hold blanks; the start time is the 20th field after it.
+  const fields = readProc(`${pid}/stat`).split(') ').at(-1)?.split(' ') ?? [];
+  return `${pid} ${fields[19]} ${readProc('sys/kernel/random/boot_id').trim()}`;
+}
+
+/** Whether the process of this identity still runs. */
+export function isAlive(identity) {
+  return identity !== '' && identityOf(Number.parseInt(identity, 10)) === identity;
+}
+
+/**
+ * Whether the process is the one we started: a remembered number alone never justifies a signal, its command line must
+ * also hold the mark, which is a path inside this clone.
  */
 export function isOurs(pid, mark) {
-  return Number.isInteger(pid) && pid > 1 && commandLineOf(pid).includes(mark);
+  return Number.isInteger(pid) && pid > 1 && `${commandLineOf(pid)} `.includes(mark);
 }
 
 /** Asks the process to end, waits, and ends it by force if it does not. Times in milliseconds. */
@@ -45,4 +57,12 @@ async function waitUntilGone(pid, mark, withinMs) {
     await pause(20);
   }
   return true;
+}
+
+function readProc(name) {
+  try {
+    return readFileSync(`/proc/${name}`, 'utf8');
+  } catch {
+    return '';
+  }
 }
