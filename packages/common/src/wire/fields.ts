@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { ROLES } from '../access/roles.js';
 import { MAX_CENTS } from '../money/cents.js';
 
 /** The building blocks of every contract, with the bounds and the plain message of each kind of field. */
@@ -63,3 +64,20 @@ export function decimalSchema(scale: number, { min = 0, max = 1_000_000 } = {}) 
 
 /** A rate as a decimal fraction in text: `"0.0825"` for 8.25 %. */
 export const rateSchema = decimalSchema(6, { min: 0, max: 1 });
+
+export const roleSchema = z.enum(ROLES, { error: 'Choose a role.' });
+
+/** The secret part of a link that was mailed to somebody. */
+export const tokenSchema = z
+  .string()
+  .regex(/^[A-Za-z0-9_-]{20,200}$/, 'This link is not complete. Open it from the e-mail again.');
+
+/** The ISO 4217 code of the shop's one currency. */
+export const currencySchema = z.string().regex(/^[A-Z]{3}$/, 'Give a currency as three letters.');
+
+/** An answer that only says where to send the browser next: a page of the payment provider. */
+export const redirectSchema = z.object({ url: z.url() });
+export type Redirect = z.infer<typeof redirectSchema>;
+
+/** The body of a command that needs nothing but its address. */
+export const emptyBodySchema = z.strictObject({});

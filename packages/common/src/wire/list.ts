@@ -36,3 +36,9 @@ export function pageSchema<Row extends z.ZodType>(row: Row) {
   return z.object({ rows: z.array(row), next: z.string().nullable(), total: z.int().optional() });
 }
 export type Page<Row> = { rows: Row[]; next: string | null; total?: number };
+
+/** The answer of a list that is short by nature and always given whole (members, operations, own sessions). */
+export function rowsSchema<Row extends z.ZodType>(row: Row) {
+  return z.object({ rows: z.array(row) });
+}
+export type Rows<Row> = { rows: Row[] };
