@@ -15,9 +15,17 @@ export function commandLineOf(pid) {
  */
 export function identityOf(pid) {
   if (commandLineOf(pid) === '') return '';
-  // The program's name stands in parentheses and may hold blanks; the start time is the 20th field after it.
-  const fields = readProc(`${pid}/stat`).split(') ').at(-1)?.split(' ') ?? [];
-  return `${pid} ${fields[19]} ${readProc('sys/kernel/random/boot_id').trim()}`;
+  return `${pid} ${statusFields(pid)[19]} ${readProc('sys/kernel/random/boot_id').trim()}`;
+}
+
+/** The number of the process that started this one; NaN when there is no such process. */
+export function parentOf(pid) {
+  return Number(statusFields(pid)[1]);
+}
+
+/** The fields of /proc/<pid>/stat after the program's name, which stands in parentheses and may hold blanks. */
+function statusFields(pid) {
+  return readProc(`${pid}/stat`).split(') ').at(-1)?.split(' ') ?? [];
 }
 
 /** Whether the process of this identity still runs. */

@@ -1,6 +1,7 @@
 import { CommandFault, endCommands } from './commands.mjs';
 import { say } from './say.mjs';
 import { lastLines } from './service.mjs';
+import { onStopAsked } from './stop-signals.mjs';
 import { Stopped, Undo } from './undo.mjs';
 
 /**
@@ -11,9 +12,7 @@ import { Stopped, Undo } from './undo.mjs';
  */
 export async function runUntilStopped(work) {
   const undo = new Undo();
-  const end = new Promise((resolve) => {
-    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => resolve({ code: 0 }));
-  });
+  const end = new Promise((resolve) => onStopAsked(() => resolve({ code: 0 })));
   let crashed;
   const crash = new Promise((resolve) => (crashed = resolve));
   const working = work({ undo, onCrash: (service) => crashed({ code: 1, service }) });
