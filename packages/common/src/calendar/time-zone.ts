@@ -10,4 +10,4 @@ export function isTimeZone(zone: string): boolean {
   }
 }
 
-export const timeZoneSchema = z.string().max(64).refine(isTimeZone, 'Choose a time zone from the list.');
+export const timeZoneSchema = z.string().max(60).refine(isTimeZone, 'Choose a time zone from the list.');

@@ -39,6 +39,16 @@ export function notesSchema(max = 4000) {
     .default('');
 }
 
+/** Several lines of text that somebody has to write. */
+export function paragraphSchema(max: number, label = 'This') {
+  return z
+    .string()
+    .trim()
+    .min(1, `${label} cannot be empty.`)
+    .max(max, `${label} can have at most ${max} characters.`)
+    .regex(/^(?:[^\p{Cc}]|[\n\r\t])*$/u, `${label} has characters that cannot be kept.`);
+}
+
 export const emailSchema = z
   .string()
   .trim()
