@@ -40,16 +40,16 @@ export const builds = {
 };
 
 /** Builds what its sources have changed since; gives whether there was anything to do. */
-export async function ensureBuilt(name) {
+export async function ensureBuilt(name, { isQuiet = false } = {}) {
   const lock = join(stateFolder, `build-${name}.lock`);
-  return withLock(lock, () => buildIfChanged(builds[name]), { withinMs: 600_000 });
+  return withLock(lock, () => buildIfChanged(builds[name], isQuiet), { withinMs: 600_000 });
 }
 
-async function buildIfChanged({ title, sources, stamp, run }) {
+async function buildIfChanged({ title, sources, stamp, run }, isQuiet) {
   const path = join(rootFolder, stamp);
   const wanted = fingerprint(sources);
   if (existsSync(path) && readFileSync(path, 'utf8') === wanted) return false;
-  await step(`Building ${title}`, run);
+  await (isQuiet ? run() : step(`Building ${title}`, run));
   mkdirSync(dirname(path), { recursive: true });
   // Written last: a build cut short is done again. The sources may have changed meanwhile, then it is done again too.
   writeFileSync(path, wanted);

@@ -6,38 +6,45 @@ import { Stopped, Undo } from './undo.mjs';
 
 /**
  * Runs the work, then stays until a signal (Ctrl-C, SIGTERM, SIGHUP) or a crash of something started; in every case
- * takes back all that was started and ends the process: with 0 when it was asked to stop, with 1 when something failed.
+ * takes back all that was started and ends the process: with 1 when something failed, and when it was asked to stop with
+ * the code for that, 0 unless given.
  *
- * @param work gets `undo` to note what it starts and `onCrash` to hand to it
+ * @param work gets `undo` to note what it starts and `onCrash` to hand to it. When it gives `{ code, lastLine }` it is
+ *   finished: the process ends with that code and prints that line last.
  */
-export async function runUntilStopped(work) {
+export async function runUntilStopped(work, { codeWhenAsked = 0 } = {}) {
   const undo = new Undo();
-  const end = new Promise((resolve) => onStopAsked(() => resolve({ code: 0 })));
+  const asked = new Promise((resolve) => onStopAsked(() => resolve({ code: codeWhenAsked, isAsked: true })));
   let crashed;
   const crash = new Promise((resolve) => (crashed = resolve));
   const working = work({ undo, onCrash: (service) => crashed({ code: 1, service }) });
-  const failure = working.then(
-    () => new Promise(() => {}),
+  const end = working.then(
+    (result) => result ?? new Promise(() => {}),
     (fault) => ({ code: 1, fault }),
   );
   // Without a timer the process would end while nothing but promises are waited for.
   const keepAlive = setInterval(() => {}, 60_000);
-  const outcome = await Promise.race([end, crash, failure]);
-  explain(outcome);
-  await stopAll(undo, working, outcome.fault);
+  const outcome = await Promise.race([asked, crash, end]);
+  await stopAll({ outcome, undo, working });
   clearInterval(keepAlive);
   process.exit(outcome.code);
 }
 
-async function stopAll(undo, working, explained) {
-  say('Stopping …');
+async function stopAll({ outcome, undo, working }) {
+  explain(outcome);
+  if (!outcome.lastLine) say('Stopping …');
   await Promise.all([undo.run(), endCommands()]);
+  if (outcome.isAsked || outcome.service) await waitForItsEnd(working, undo);
+  say(outcome.lastLine ?? 'Stopped.');
+}
+
+/** Work that was interrupted meets a stopped command or a closed way on; whatever it still started is taken back. */
+async function waitForItsEnd(working, undo) {
   await working.catch((fault) => {
     const isConsequence = fault instanceof Stopped || fault instanceof CommandFault;
-    if (fault !== explained && !isConsequence) console.error(fault.message);
+    if (!isConsequence) console.error(fault.message);
   });
   await undo.run();
-  say('Stopped.');
 }
 
 function explain({ fault, service }) {

@@ -23,7 +23,7 @@ export function apiEnvironment({ folder, ports, database, secrets, mode }) {
     BOOKMATCH_MAIL_HOST: loopback,
     BOOKMATCH_MAIL_PORT: String(ports.smtp),
     BOOKMATCH_MAIL_TLS: 'off',
-    BOOKMATCH_MAIL_FROM: 'Bookmatch <post@bookmatch.test>',
+    BOOKMATCH_MAIL_FROM: 'post@bookmatch.test',
     BOOKMATCH_PAYMENTS_KEY: secrets.paymentsKey,
     BOOKMATCH_PAYMENTS_WEBHOOK_SECRET: secrets.paymentsWebhook,
     BOOKMATCH_PAYMENTS_PRICE: 'price_bookmatch_member_month',

@@ -32,7 +32,17 @@ const compiledScripts = {
  * @param onCrash called with `{ name, reason, logFile }` when one of them ends by itself
  * @returns the addresses people and tests need
  */
-export async function startStack({ folder, webPort, durability, mode, withDemo, webReady, undo, onCrash }) {
+export async function startStack({
+  folder,
+  webPort,
+  durability,
+  mode,
+  withDemo,
+  webReady,
+  isQuiet,
+  undo,
+  onCrash,
+}) {
   await endLeftovers(folder);
   const database = await startDatabase({ folder, durability, undo, onCrash });
   const ports = await choosePorts(folder, webPort);
@@ -46,7 +56,8 @@ export async function startStack({ folder, webPort, durability, mode, withDemo, 
     start('payments', compiledScripts.payments, paymentsFakeEnvironment(settings)),
   ]);
   if (withDemo && existsSync(compiledScripts.demo)) {
-    await step('Making sure the demo shop is there', () => runScript(compiledScripts.demo, env, undo));
+    const makeDemo = () => runScript(compiledScripts.demo, env, undo);
+    await (isQuiet ? makeDemo() : step('Making sure the demo shop is there', makeDemo));
   }
   await webReady;
   await start('api', compiledScripts.api, env, `http://127.0.0.1:${ports.web}/api/ready`);

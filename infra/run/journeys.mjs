@@ -1,0 +1,53 @@
+import { join } from 'node:path';
+import { findProgram } from '../database/programs.mjs';
+import { lastLines } from './service.mjs';
+import { startStack } from './stack.mjs';
+import { runJourneys } from './test-runners.mjs';
+import { Undo } from './undo.mjs';
+
+const preferredPort = 4410;
+
+/** Starts a Bookmatch of its own, with an empty database and both fakes, and drives it with a browser. */
+export async function journeysCheck({ words, resultFolder, folder, undo: outerUndo }) {
+  const undo = new Undo();
+  await outerUndo.add(() => undo.run());
+  let crashed = '';
+  const onCrash = ({ name, reason, logFile }) => {
+    crashed += `\nThe ${name} ${reason}. Its last lines:\n${lastLines(logFile)}\n`;
+  };
+  const stackFolder = join(folder, 'journeys');
+  const options = {
+    folder: stackFolder,
+    webPort: preferredPort,
+    durability: 'fast',
+    mode: 'test',
+    isQuiet: true,
+  };
+  try {
+    const stack = await startStack({ ...options, withDemo: true, webReady: undefined, undo, onCrash });
+    const result = await runJourneys({ words, resultFolder, environment: environmentOf(stack) });
+    return withLogs(result, crashed, join(stackFolder, 'api.log'));
+  } finally {
+    await undo.run();
+  }
+}
+
+/** What playwright.config.ts and the journeys read. */
+export function environmentOf({ address, inbox, payments }) {
+  return {
+    BOOKMATCH_E2E_ADDRESS: address,
+    BOOKMATCH_E2E_MAIL: inbox,
+    BOOKMATCH_E2E_PAYMENTS: payments,
+    BOOKMATCH_E2E_CHROMIUM: findProgram('chromium'),
+  };
+}
+
+function withLogs(result, crashed, apiLog) {
+  if (result.failed === 0 && !crashed) return result;
+  const failed = Math.max(1, result.failed);
+  return {
+    ...result,
+    failed,
+    output: `${result.output}${crashed}\nThe end of the API's log:\n${lastLines(apiLog, 15)}`,
+  };
+}
