@@ -61,12 +61,14 @@ async function startDatabase(folder, undo, onCrash) {
 }
 
 async function runOne(check, done, surroundings) {
+  if (surroundings.undo.hasBegun)
+    return { passed: 0, failed: 1, output: 'Not run, because the tests were stopped.' };
   const failedNeed = (check.after ?? []).find((name) => done.get(name)?.failed > 0);
   const begun = performance.now();
   const result = failedNeed
     ? { passed: 0, failed: 1, output: `Not run, because ${failedNeed} failed.` }
     : await attempt(check, surroundings);
-  tell(check, result, performance.now() - begun);
+  if (!surroundings.undo.hasBegun) tell(check, result, performance.now() - begun);
   return result;
 }
 

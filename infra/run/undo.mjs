@@ -9,6 +9,10 @@ export class Undo {
   #steps = [];
   #begun = false;
 
+  get hasBegun() {
+    return this.#begun;
+  }
+
   /** Throws Stopped if taking back has begun: called before anything is started. */
   check() {
     if (this.#begun) throw new Stopped('stopped');
