@@ -1,0 +1,198 @@
+import * as z from 'zod';
+import {
+  centsSchema,
+  dateSchema,
+  decimalSchema,
+  emailSchema,
+  idSchema,
+  instantSchema,
+  lineSchema,
+  notesSchema,
+  optionalLineSchema,
+  paragraphSchema,
+  positiveCentsSchema,
+  rateSchema,
+  versionSchema,
+} from '../wire/fields.js';
+import { listQuerySchema, pageSchema } from '../wire/list.js';
+import {
+  invoiceKindSchema,
+  invoiceStandingSchema,
+  invoiceStatusSchema,
+  paymentMethodSchema,
+  recordedMethodSchema,
+} from './invoice-standings.js';
+
+/** A line as typed. A price below zero takes something off; the invoice as a whole stays above zero. */
+export const invoiceLineSchema = z.strictObject({
+  id: idSchema,
+  description: lineSchema(300, 'The description'),
+  quantity: decimalSchema(3, { max: 100_000 }),
+  unitPriceCents: centsSchema
+    .min(-100_000_000, 'Give at most $1,000,000 a unit.')
+    .max(100_000_000, 'Give at most $1,000,000 a unit.'),
+  taxable: z.boolean(),
+});
+export type InvoiceLine = z.infer<typeof invoiceLineSchema>;
+
+const linesSchema = z.array(invoiceLineSchema).max(200, 'An invoice can have at most 200 lines.');
+
+/**
+ * A draft comes from a stage of a job's billing schedule, whose net and tax it takes over as they were accepted, or it
+ * is free: lines of its own, for a customer or for more work on a job.
+ */
+export const createInvoiceSchema = z.discriminatedUnion('from', [
+  z.strictObject({ from: z.literal('stage'), jobId: idSchema, billingStageId: idSchema }),
+  z.strictObject({
+    from: z.literal('lines'),
+    customerId: idSchema,
+    jobId: idSchema.nullable().default(null),
+    lines: linesSchema,
+    taxRate: rateSchema,
+    memo: notesSchema(2000),
+  }),
+]);
+export type CreateInvoice = z.infer<typeof createInvoiceSchema>;
+export type CreateInvoiceInput = z.input<typeof createInvoiceSchema>;
+
+/** Lines and tax rate can be changed on a free draft only: a stage's amounts were agreed with the customer. */
+export const updateInvoiceSchema = z.strictObject({
+  memo: z.string().trim().max(2000, 'This can have at most 2000 characters.').optional(),
+  /** Null: counted from the day of issue by the shop's days. */
+  dueOn: dateSchema.nullable().optional(),
+  lines: linesSchema.optional(),
+  taxRate: rateSchema.optional(),
+});
+export type UpdateInvoice = z.infer<typeof updateInvoiceSchema>;
+
+// Commands. Each carries If-Match.
+
+/** Gives the number and the dates, today in the shop's zone, and books it. Nothing of it changes afterwards. */
+export const issueInvoiceSchema = z.strictObject({});
+
+export const sendInvoiceSchema = z.strictObject({ to: emailSchema, message: notesSchema(2000) });
+export type SendInvoice = z.infer<typeof sendInvoiceSchema>;
+
+export const recordPaymentSchema = z.strictObject({
+  method: recordedMethodSchema,
+  amountCents: positiveCentsSchema,
+  receivedOn: dateSchema,
+  /** The check's number, the transfer's text. */
+  reference: optionalLineSchema(80, 'The reference'),
+});
+export type RecordPayment = z.infer<typeof recordPaymentSchema>;
+
+/** An amount with its tax, or the whole open balance when left out. What was paid is refunded, not credited. */
+export const creditInvoiceSchema = z.strictObject({
+  amountCents: positiveCentsSchema.optional(),
+  reason: paragraphSchema(500, 'The reason'),
+});
+export type CreditInvoice = z.infer<typeof creditInvoiceSchema>;
+
+export const paymentSchema = z.object({
+  id: idSchema,
+  method: paymentMethodSchema,
+  amountCents: centsSchema,
+  receivedOn: dateSchema,
+  reference: z.string(),
+  recordedBy: z.string().nullable(),
+  createdAt: instantSchema,
+});
+export type Payment = z.infer<typeof paymentSchema>;
+
+export const creditNoteSchema = z.object({
+  id: idSchema,
+  number: z.int(),
+  issuedOn: dateSchema,
+  netCents: centsSchema,
+  taxCents: centsSchema,
+  amountCents: centsSchema,
+  reason: z.string(),
+});
+export type CreditNote = z.infer<typeof creditNoteSchema>;
+
+export const invoiceSendSchema = z.object({ id: idSchema, to: z.string(), sentAt: instantSchema });
+export type InvoiceSend = z.infer<typeof invoiceSendSchema>;
+
+const amounts = {
+  netCents: centsSchema,
+  taxCents: centsSchema,
+  totalCents: centsSchema,
+  paidCents: centsSchema,
+  creditedCents: centsSchema,
+  balanceCents: centsSchema,
+};
+const place = {
+  status: invoiceStatusSchema,
+  standing: invoiceStandingSchema,
+  /** Whole days past the due date; 0 unless overdue. */
+  daysOverdue: z.int(),
+  kind: invoiceKindSchema,
+  issuedOn: dateSchema.nullable(),
+  dueOn: dateSchema.nullable(),
+};
+
+export const invoiceSchema = z.object({
+  id: idSchema,
+  version: versionSchema,
+  /** Null until it is issued. */
+  number: z.int().nullable(),
+  ...place,
+  customer: z.object({ id: idSchema, name: z.string(), email: z.string() }),
+  job: z.object({ id: idSchema, number: z.int(), title: z.string() }).nullable(),
+  billingStage: z.object({ id: idSchema, name: z.string() }).nullable(),
+  lines: z.array(z.object({ ...invoiceLineSchema.shape, amountCents: centsSchema })),
+  /** Null when the tax is the stage's agreed share and not a rate on the lines. */
+  taxRate: z.string().nullable(),
+  ...amounts,
+  memo: z.string(),
+  payments: z.array(paymentSchema),
+  creditNotes: z.array(creditNoteSchema),
+  sends: z.array(invoiceSendSchema),
+  /** What must be put right before it can be issued; empty when nothing, and once it is issued. */
+  issueRefusals: z.array(z.string()),
+  createdAt: instantSchema,
+});
+export type Invoice = z.infer<typeof invoiceSchema>;
+
+export const invoiceRowSchema = z.object({
+  id: idSchema,
+  number: z.int().nullable(),
+  ...place,
+  customerId: idSchema,
+  customerName: z.string(),
+  jobId: idSchema.nullable(),
+  jobNumber: z.int().nullable(),
+  stageName: z.string().nullable(),
+  createdAt: instantSchema,
+  totalCents: centsSchema,
+  balanceCents: centsSchema,
+});
+export type InvoiceRow = z.infer<typeof invoiceRowSchema>;
+export const invoicePageSchema = pageSchema(invoiceRowSchema);
+
+export const INVOICE_SORT_KEYS = ['number', 'issuedOn', 'dueOn', 'createdAt'] as const;
+export const invoiceListQuerySchema = listQuerySchema(INVOICE_SORT_KEYS).extend({
+  /** A standing, or `open` for everything issued that is still owed. */
+  standing: z.enum(['draft', 'open', 'overdue', 'paid', 'credited']).optional(),
+  customerId: idSchema.optional(),
+  jobId: idSchema.optional(),
+  issuedFrom: dateSchema.optional(),
+  issuedTo: dateSchema.optional(),
+});
+export type InvoiceListQuery = z.infer<typeof invoiceListQuerySchema>;
+
+/** Every payment of the shop, newest first: what the bookkeeper lays beside the bank's list. */
+export const paymentRowSchema = paymentSchema.extend({
+  invoiceId: idSchema,
+  invoiceNumber: z.int(),
+  customerName: z.string(),
+});
+export type PaymentRow = z.infer<typeof paymentRowSchema>;
+export const paymentPageSchema = pageSchema(paymentRowSchema);
+export const paymentListQuerySchema = listQuerySchema(['receivedOn']).extend({
+  method: paymentMethodSchema.optional(),
+  from: dateSchema.optional(),
+  to: dateSchema.optional(),
+});
+export type PaymentListQuery = z.infer<typeof paymentListQuerySchema>;
