@@ -37,8 +37,6 @@ export const customerEstimateSchema = z.object({
   documentHash: z.string(),
   questions: z.array(questionSchema),
   acceptance: z.object({ name: z.string(), acceptedAt: instantSchema, documentHash: z.string() }).nullable(),
-  /** The link to the deposit's invoice once it is issued and can be paid; null before. */
-  depositInvoiceUrl: z.string().nullable(),
 });
 export type CustomerEstimate = z.infer<typeof customerEstimateSchema>;
 
