@@ -1,0 +1,41 @@
+import type { EntityClass } from './platform/database/data-source.js';
+import { AuditEntry } from './platform/database/audit-entry.entity.js';
+import { IdempotencyKey } from './platform/http/idempotency-key.entity.js';
+import { RateLimitCounter } from './platform/http/rate-limits.js';
+import { OutboxMessage } from './platform/outbox/outbox-message.entity.js';
+import { WebhookEvent } from './platform/payments/webhook-event.entity.js';
+import { SessionRow } from './platform/sessions/session.entity.js';
+import { Person } from './features/accounts/person.entity.js';
+import { PersonToken } from './features/accounts/person-token.entity.js';
+import { Customer } from './features/customers/customer.entity.js';
+import { Site } from './features/customers/site.entity.js';
+import { Member } from './features/shops/member.entity.js';
+import { Shop } from './features/shops/shop.entity.js';
+import { ShopCounter } from './features/shops/shop-counter.entity.js';
+import { Subscription } from './features/subscription/subscription.entity.js';
+
+/** Every table there is, slice by slice. */
+export const ENTITIES: readonly EntityClass[] = [
+  // platform
+  AuditEntry,
+  IdempotencyKey,
+  RateLimitCounter,
+  OutboxMessage,
+  WebhookEvent,
+  SessionRow,
+  // accounts
+  Person,
+  PersonToken,
+  // shops
+  Shop,
+  Member,
+  ShopCounter,
+  // subscription
+  Subscription,
+  // customers
+  Customer,
+  Site,
+];
+
+/** Tables in which nothing is ever changed or removed: the application's database account may only read and insert. */
+export const APPEND_ONLY_TABLES: readonly string[] = ['audit_entry'];

@@ -1,0 +1,5 @@
+/** What other slices may use of `shops`. */
+export { Shop } from './shop.entity.js';
+export { Member } from './member.entity.js';
+export { createShop } from './shop-creation.js';
+export { takeNumber, COUNTER_STARTS, type CounterKind } from './shop-counters.js';

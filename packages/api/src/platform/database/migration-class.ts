@@ -1,0 +1,3 @@
+import type { MigrationInterface } from 'typeorm';
+
+export type MigrationClass = new () => MigrationInterface;

@@ -1,0 +1,49 @@
+import type { Response } from 'express';
+import type { Answered } from './idempotency.js';
+import type { Download } from './route.js';
+
+export function sendAnswer(response: Response, answered: Answered | Download): void {
+  response.set('Cache-Control', 'no-store');
+  if ('download' in answered) {
+    sendDownload(response, answered);
+    return;
+  }
+  const { status, body } = answered;
+  if (body === undefined || body === null) {
+    response.status(status === 200 ? 204 : status).end();
+    return;
+  }
+  setVersion(response, body);
+  setNext(response, body);
+  response.status(status).json(body);
+}
+
+function setVersion(response: Response, body: unknown): void {
+  const { version } = body as { version?: unknown };
+  if (typeof version === 'number') response.set('ETag', `"${version}"`);
+}
+
+/** RFC 8288: the address of a list's next page. */
+function setNext(response: Response, body: unknown): void {
+  const { next } = body as { next?: unknown };
+  if (typeof next !== 'string') return;
+  const here = new URL(response.req.originalUrl, 'http://local');
+  here.searchParams.set('after', next);
+  response.set('Link', `<${here.pathname}${here.search}>; rel="next"`);
+}
+
+/**
+ * A file never runs in our origin: it is an attachment unless the route vouches for its type, and even then it is
+ * sandboxed and not sniffed.
+ */
+function sendDownload(response: Response, { download }: Download): void {
+  const { name, type, inline, body } = download;
+  response.set({
+    'Content-Type': type,
+    'Content-Disposition': `${inline ? 'inline' : 'attachment'}; filename*=UTF-8''${encodeURIComponent(name)}`,
+    'Content-Security-Policy': "sandbox; default-src 'none'; style-src 'unsafe-inline'; img-src 'self'",
+    'X-Content-Type-Options': 'nosniff',
+  });
+  if (Buffer.isBuffer(body)) response.send(body);
+  else body.on('error', () => response.destroy()).pipe(response);
+}
