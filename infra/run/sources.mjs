@@ -3,16 +3,15 @@ import { readdirSync, readFileSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 import { rootFolder } from './places.mjs';
 
-const leftOut = new Set([
+const madeByTools = new Set([
   'node_modules',
   'dist',
   '.angular',
   'coverage',
   'test-results',
   'playwright-report',
-  'e2e',
-  'run',
 ]);
+const notBuilt = new Set(['infra/run', 'infra/database', 'packages/web/e2e']);
 
 /**
  * A fingerprint of the content of files and folders, given by their paths from the root. Tests and what a build makes
@@ -34,7 +33,7 @@ function filesUnder(path) {
   if (!entry) return [];
   if (!entry.isDirectory()) return isBuilt(path) ? [] : [path];
   return readdirSync(join(rootFolder, path))
-    .filter((name) => !leftOut.has(name))
+    .filter((name) => !madeByTools.has(name) && !notBuilt.has(`${path}/${name}`))
     .sort()
     .flatMap((name) => filesUnder(`${path}/${name}`));
 }
