@@ -1,0 +1,2 @@
+/** What the rest of the application may use of this slice. */
+export { sessionRenewal } from './sign-in-again/session-renewal';

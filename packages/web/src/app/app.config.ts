@@ -1,0 +1,56 @@
+import {
+  inject,
+  provideAppInitializer,
+  provideBrowserGlobalErrorListeners,
+  type ApplicationConfig,
+} from '@angular/core';
+import {
+  MAT_FORM_FIELD_DEFAULT_OPTIONS,
+  type MatFormFieldDefaultOptions,
+} from '@angular/material/form-field';
+import {
+  provideRouter,
+  TitleStrategy,
+  withComponentInputBinding,
+  withInMemoryScrolling,
+} from '@angular/router';
+import { provideEffects } from '@ngrx/effects';
+import { provideStore } from '@ngrx/store';
+import { sessionRenewal } from './accounts/accounts-public';
+import { outsideRoutes, shopRoutes } from './app.routes';
+import { provideApi } from './platform/api/api.providers';
+import { SESSION_RENEWAL } from './platform/api/session-renewal';
+import { PageTitle } from './platform/page/page-title';
+import { shopSlugOf } from './platform/session/address';
+import { CurrentShop } from './platform/session/current-shop';
+import { provideSession } from './platform/session/session.providers';
+import { registerIcons } from './ui/icons/register-icons';
+import { SHOP_UNITS, SHOP_ZONE } from './ui/formats/shop-settings';
+
+const formFields: MatFormFieldDefaultOptions = {
+  appearance: 'outline',
+  floatLabel: 'auto',
+  subscriptSizing: 'fixed',
+};
+
+/** The only place that wires the application: what the platform leaves open is filled here. */
+export const appConfig: ApplicationConfig = {
+  providers: [
+    provideBrowserGlobalErrorListeners(),
+    provideRouter(
+      shopSlugOf(location.pathname) === null ? outsideRoutes : shopRoutes,
+      withComponentInputBinding(),
+      withInMemoryScrolling({ scrollPositionRestoration: 'enabled', anchorScrolling: 'enabled' }),
+    ),
+    provideStore(),
+    provideEffects(),
+    provideApi(),
+    provideSession(),
+    provideAppInitializer(registerIcons),
+    { provide: TitleStrategy, useExisting: PageTitle },
+    { provide: MAT_FORM_FIELD_DEFAULT_OPTIONS, useValue: formFields },
+    { provide: SESSION_RENEWAL, useFactory: sessionRenewal },
+    { provide: SHOP_ZONE, useFactory: () => inject(CurrentShop).timeZone },
+    { provide: SHOP_UNITS, useFactory: () => inject(CurrentShop).unitSystem },
+  ],
+};

@@ -1,0 +1,33 @@
+import { inject, InjectionToken } from '@angular/core';
+import { createMongoAbility } from '@casl/ability';
+import { AbilityServiceSignal } from '@casl/angular';
+import type { Ability, Action, Subject } from '@bookmatch/common/access/ability';
+
+/** What the signed-in member may do; filled when the session is known, empty before. */
+export const ABILITY = new InjectionToken<Ability>('ABILITY');
+
+/** Nobody may do anything. Rows are told apart as in `defineAbility`, since updating the rules keeps this. */
+export function emptyAbility(): Ability {
+  return createMongoAbility<Ability>([], {
+    detectSubjectType: (row) => row.__caslSubjectType__ ?? 'Shop',
+  });
+}
+
+export type Can = (
+  action: Action,
+  subject: Subject | (Record<PropertyKey, unknown> & { __caslSubjectType__?: Subject }),
+  field?: 'floor' | 'money',
+) => boolean;
+
+/** In a field of a component: `protected readonly can = injectCan();`, in its template `can('create', 'Customer')`. */
+export function injectCan(): Can {
+  return inject<AbilityServiceSignal<Ability>>(AbilityServiceSignal).can;
+}
+
+/** The row as the ability's conditions see it. A copy, since rows of the store cannot be marked. */
+export function asSubject<Row extends object>(
+  type: Subject,
+  row: Row,
+): Row & { __caslSubjectType__: Subject } {
+  return { ...row, __caslSubjectType__: type };
+}

@@ -1,0 +1,24 @@
+import type { Session } from '@bookmatch/common/accounts/accounts-contract';
+import type { Problem } from '@bookmatch/common/problems/problem';
+import { createActionGroup, emptyProps, props } from '@ngrx/store';
+
+export const SessionPage = createActionGroup({
+  source: 'Session Page',
+  events: {
+    started: props<{ slug: string | null }>(),
+    signedIn: emptyProps(),
+    signOutPressed: props<{ everywhere: boolean }>(),
+    nameChanged: props<{ name: string }>(),
+  },
+});
+
+export const SessionApi = createActionGroup({
+  source: 'Session API',
+  events: {
+    loaded: props<{ session: Session }>(),
+    missing: emptyProps(),
+    loadFailed: props<{ problem: Problem }>(),
+    signedOut: emptyProps(),
+    signOutFailed: props<{ problem: Problem }>(),
+  },
+});

@@ -1,0 +1,47 @@
+import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import { MatIcon } from '@angular/material/icon';
+
+export type Stage = { key: string; name: string };
+
+/** The stages of a thing in their order: those behind checked, the present one underlined. */
+@Component({
+  selector: 'bm-stage-track',
+  imports: [MatIcon],
+  template: `
+    <ol [attr.aria-label]="label()">
+      @for (step of steps(); track step.key) {
+        <li [class]="step.state" [attr.aria-current]="step.state === 'current' ? 'step' : null">
+          @if (step.open) {
+            <button type="button" (click)="picked.emit(step.key)">
+              <mat-icon class="tick" svgIcon="check" inline />{{ step.name }}
+            </button>
+          } @else {
+            <span><mat-icon class="tick" svgIcon="check" inline />{{ step.name }}</span>
+          }
+          @if (step.state === 'done') {
+            <span class="bm-spoken">done</span>
+          }
+        </li>
+      }
+    </ol>
+  `,
+  styleUrl: './stage-track.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class StageTrack {
+  readonly label = input('Stages');
+  readonly stages = input.required<readonly Stage[]>();
+  readonly current = input.required<string>();
+  /** The stages that may be moved to from here; the others are only shown. */
+  readonly reachable = input<readonly string[]>([]);
+  readonly picked = output<string>();
+
+  protected readonly steps = computed(() => {
+    const at = this.stages().findIndex(({ key }) => key === this.current());
+    return this.stages().map((stage, index) => ({
+      ...stage,
+      state: index < at ? 'done' : index === at ? 'current' : 'ahead',
+      open: this.reachable().includes(stage.key),
+    }));
+  });
+}
