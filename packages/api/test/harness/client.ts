@@ -75,7 +75,7 @@ export class Client {
         ...(version === undefined ? {} : { 'If-Match': `"${version}"` }),
         ...headers,
       });
-    return this.finish(body === undefined ? call : call.send(body));
+    return this.finish(body === undefined ? call : call.send(body as object));
   }
 
   private async csrfToken(): Promise<string> {
