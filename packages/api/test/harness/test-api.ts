@@ -130,25 +130,20 @@ export class TestApi {
     const stamp = { author: { kind: 'system' as const }, requestId: 'test', now: this.clock.read() };
     const passwordHash = await hashPassword(PASSWORD);
     const { memberId, personId } = await this.platform.work.transaction(stamp, async (scope) => {
-      const person = await scope
-        .global(Person)
-        .insert({
-          id: scope.newId(),
-          email,
-          name: `${role} ${this.people}`,
-          passwordHash,
-          emailConfirmedAt: scope.now,
-        });
-      const member = await scope
-        .forShop(shopId)
-        .rows(Member)
-        .insert({
-          id: scope.newId(),
-          personId: person.id,
-          role,
-          laborCostCentsPerHour: null,
-          removedAt: null,
-        });
+      const person = await scope.global(Person).insert({
+        id: scope.newId(),
+        email,
+        name: `${role} ${this.people}`,
+        passwordHash,
+        emailConfirmedAt: scope.now,
+      });
+      const member = await scope.forShop(shopId).rows(Member).insert({
+        id: scope.newId(),
+        personId: person.id,
+        role,
+        laborCostCentsPerHour: null,
+        removedAt: null,
+      });
       return { memberId: member.id, personId: person.id };
     });
     const client = await this.signIn(email);
