@@ -43,6 +43,9 @@ export const estimateLineSchema = z.strictObject({
 });
 export type EstimateLine = z.infer<typeof estimateLineSchema>;
 
+/** Half of MAX_CENTS would do for the highest tax rate; a round figure is easier to say. */
+export const MAX_PRICE_CENTS = 4_000_000_000;
+export const MAX_PLANNED_MINUTES = 6_000_000;
 export const MAX_ROOMS = 60;
 export const MAX_LINES_PER_ROOM = 200;
 export const estimateRoomSchema = z.strictObject({
@@ -73,13 +76,38 @@ export type RevisionContent = z.infer<typeof revisionContentSchema>;
  * version), because the editor saves by itself while somebody types. What cannot be sent yet can still be saved: a
  * schedule that does not add up is kept, and named in `sendRefusals` of the answer.
  */
-export const saveRevisionSchema = revisionContentSchema.refine(
-  (revision) =>
-    allDistinct(revision.rooms.flatMap((room) => [room.id, ...room.lines.map((line) => line.id)])),
-  { error: 'Every room and line needs an id of its own.', path: ['rooms'] },
-);
+export const saveRevisionSchema = revisionContentSchema
+  .refine(
+    ({ rooms }) => allDistinct(rooms.flatMap((room) => [room.id, ...room.lines.map((line) => line.id)])),
+    { error: 'Every room and line needs an id of its own.', path: ['rooms'] },
+  )
+  .refine(({ billingSchedule }) => allDistinct(billingSchedule.map((stage) => stage.id)), {
+    error: 'Every stage needs an id of its own.',
+    path: ['billingSchedule'],
+  })
+  .refine(({ rooms }) => upperBound(rooms, (line) => line.unitPriceCents) <= MAX_PRICE_CENTS, {
+    error: 'The price of an estimate can be at most $40,000,000.',
+    path: ['rooms'],
+  })
+  .refine(({ rooms }) => upperBound(rooms, (line) => line.unitCostCents) <= MAX_PRICE_CENTS, {
+    error: 'The cost of an estimate can be at most $40,000,000.',
+    path: ['rooms'],
+  })
+  .refine(
+    ({ rooms }) => upperBound(rooms, (line) => Number(line.plannedMinutesPerUnit)) <= MAX_PLANNED_MINUTES,
+    {
+      error: 'An estimate can plan at most 100,000 hours.',
+      path: ['rooms'],
+    },
+  );
 export type SaveRevision = z.infer<typeof saveRevisionSchema>;
 export type SaveRevisionInput = z.input<typeof saveRevisionSchema>;
+
+/** Bounds that keep every sum of a revision, tax included, inside MAX_CENTS; no rounding is done here. */
+function upperBound(rooms: EstimateRoom[], perUnit: (line: EstimateLine) => number): number {
+  const lines = rooms.flatMap((room) => room.lines);
+  return lines.reduce((sum, line) => sum + Number(line.quantity) * perUnit(line), 0);
+}
 
 function allDistinct(ids: string[]): boolean {
   return new Set(ids).size === ids.length;

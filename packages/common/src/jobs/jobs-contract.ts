@@ -103,10 +103,13 @@ export const jobMoneySchema = z.object({
   contractTotalCents: centsSchema,
   plannedCostCents: centsSchema,
   actualCostCents: centsSchema,
+  /** Spent and still to go, category by category: what the job is on pace for. */
+  expectedCostCents: centsSchema,
   costs: z.array(jobCostRowSchema),
   billing: z.array(jobBillingRowSchema),
   /** Invoiced with tax, less credits; and what was paid of it. */
   billedCents: centsSchema,
+  billedNetCents: centsSchema,
   paidCents: centsSchema,
   /** Cost-to-cost, as a decimal to four places, never above 1; null when no cost was planned. */
   percentComplete: z.string().nullable(),
