@@ -10,7 +10,7 @@ import type { AddressForm } from './address-form';
   selector: 'bm-address-fields',
   imports: [ErrorOf, MatError, MatFormField, MatInput, MatLabel, ReactiveFormsModule],
   template: `
-    <div class="bm-fields" [formGroup]="form()">
+    <div class="bm-fields three" [formGroup]="form()">
       <mat-form-field class="wide">
         <mat-label>Street</mat-label>
         <input matInput autocomplete="off" formControlName="street" />

@@ -3,10 +3,11 @@ import { rxResource, toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { MatDialogRef } from '@angular/material/dialog';
 import { MatIcon } from '@angular/material/icon';
 import { Router } from '@angular/router';
+import { quickFindSchema, type Found } from '@bookmatch/common/today/quick-find-contract';
 import { debounceTime } from 'rxjs';
 import { ApiClient } from '../../platform/api/api-client';
 import { injectShopUrl } from '../../platform/session/current-shop';
-import { foundSchema, PLACES, type FoundRow } from './found';
+import { PLACES } from './places';
 
 const TYPING_PAUSE_MS = 200;
 
@@ -32,7 +33,7 @@ export class QuickFind {
 
   protected readonly found = rxResource({
     params: () => this.asked().trim() || undefined,
-    stream: ({ params: q }) => this.api.get(this.shopUrl('/find'), { answer: foundSchema, query: { q } }),
+    stream: ({ params: q }) => this.api.get(this.shopUrl('/find'), { answer: quickFindSchema, query: { q } }),
   });
   protected readonly rows = computed(() => (this.found.hasValue() ? this.found.value().rows : []));
   private readonly chosen = signal(0);
@@ -56,7 +57,7 @@ export class QuickFind {
     }
   }
 
-  protected open(row: FoundRow): void {
+  protected open(row: Found): void {
     this.dialog.close();
     void this.router.navigateByUrl(`${PLACES[row.kind].path}/${row.id}`);
   }

@@ -79,6 +79,10 @@ export class DataTable<Row extends { id: string }> {
     return column.phone ?? (index === 0 ? 'title' : 'line');
   }
 
+  protected isBlank(column: Column<Row>, row: Row): boolean {
+    return !this.templates().has(column.key) && !column.text?.(row);
+  }
+
   protected sortBy(key: string): void {
     this.sortChange.emit(nextSort(this.sort(), key));
   }

@@ -16,7 +16,7 @@ import { placeFieldProblems } from './field-problems';
 
 /**
  * Shows the server's refusal of a form: each field's sentence at its field, the rest here, read out. Stands inside its
- * `<form>` and moves the focus to the first field that needs correcting.
+ * `<form>` and moves the focus to the first field that needs correcting, or itself into view.
  */
 @Component({
   selector: 'bm-form-errors',
@@ -39,7 +39,12 @@ export class FormErrors {
     const injector = inject(Injector);
     effect(() => {
       placeFieldProblems(this.form(), this.fields());
-      if (this.fields().length > 0) afterNextRender(() => focusFirstInvalid(host), { injector });
+      if (!this.problem()) return;
+      afterNextRender(
+        () =>
+          this.fields().length > 0 ? focusFirstInvalid(host) : host.scrollIntoView?.({ block: 'center' }),
+        { injector },
+      );
     });
   }
 }

@@ -13,7 +13,9 @@ import { PageTitle } from '../../platform/page/page-title';
   template: `
     <div class="words">
       @if (backTo(); as link) {
-        <a class="number" [routerLink]="link"><mat-icon svgIcon="back" inline />{{ number() }}</a>
+        <a class="number" [routerLink]="link"
+          ><mat-icon class="bm-small-icon" svgIcon="back" />{{ number() }}</a
+        >
       } @else if (number()) {
         <p class="number">{{ number() }}</p>
       }

@@ -13,10 +13,10 @@ export type Stage = { key: string; name: string };
         <li [class]="step.state" [attr.aria-current]="step.state === 'current' ? 'step' : null">
           @if (step.open) {
             <button type="button" (click)="picked.emit(step.key)">
-              <mat-icon class="tick" svgIcon="check" inline />{{ step.name }}
+              <mat-icon class="bm-small-icon tick" svgIcon="check" />{{ step.name }}
             </button>
           } @else {
-            <span><mat-icon class="tick" svgIcon="check" inline />{{ step.name }}</span>
+            <span><mat-icon class="bm-small-icon tick" svgIcon="check" />{{ step.name }}</span>
           }
           @if (step.state === 'done') {
             <span class="bm-spoken">done</span>
