@@ -9,7 +9,16 @@ import { Person } from './features/accounts/person.entity.js';
 import { PersonToken } from './features/accounts/person-token.entity.js';
 import { Customer } from './features/customers/customer.entity.js';
 import { Site } from './features/customers/site.entity.js';
+import { Job } from './features/jobs/job.entity.js';
+import { JobAssignment } from './features/jobs/job-assignment.entity.js';
+import { JobBillingStage } from './features/jobs/job-billing-stage.entity.js';
+import { JobCost } from './features/jobs/job-cost.entity.js';
+import { JobFile } from './features/jobs/job-file.entity.js';
+import { JobOperation } from './features/jobs/job-operation.entity.js';
+import { JobPlannedCost } from './features/jobs/job-planned-cost.entity.js';
+import { JobStageChange } from './features/jobs/job-stage-change.entity.js';
 import { Member } from './features/shops/member.entity.js';
+import { Operation } from './features/shops/operation.entity.js';
 import { Shop } from './features/shops/shop.entity.js';
 import { ShopCounter } from './features/shops/shop-counter.entity.js';
 import { Subscription } from './features/subscription/subscription.entity.js';
@@ -30,12 +39,22 @@ export const ENTITIES: readonly EntityClass[] = [
   Shop,
   Member,
   ShopCounter,
+  Operation,
   // subscription
   Subscription,
   // customers
   Customer,
   Site,
+  // jobs
+  Job,
+  JobAssignment,
+  JobBillingStage,
+  JobCost,
+  JobFile,
+  JobOperation,
+  JobPlannedCost,
+  JobStageChange,
 ];
 
 /** Tables in which nothing is ever changed or removed: the application's database account may only read and insert. */
-export const APPEND_ONLY_TABLES: readonly string[] = ['audit_entry'];
+export const APPEND_ONLY_TABLES: readonly string[] = ['audit_entry', 'job_cost', 'job_stage_change'];

@@ -1,6 +1,7 @@
 import type { Address } from '@bookmatch/common/customers/customers-contract';
 import type { GlobalScope } from '../../platform/database/scope.js';
 import { Member } from './member.entity.js';
+import { createDefaultOperations } from './operations-service.js';
 import { createCounters } from './shop-counters.js';
 import { Shop } from './shop.entity.js';
 
@@ -40,6 +41,7 @@ export async function createShop(scope: GlobalScope, personId: string, input: Ne
     .rows(Member)
     .insert({ id: scope.newId(), personId, role: 'owner', laborCostCentsPerHour: null, removedAt: null });
   await createCounters(inShop);
+  await createDefaultOperations(inShop);
   return shop.id;
 }
 

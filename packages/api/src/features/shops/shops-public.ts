@@ -1,5 +1,6 @@
 /** What other slices may use of `shops`. */
 export { Shop } from './shop.entity.js';
 export { Member } from './member.entity.js';
+export { Operation } from './operation.entity.js';
 export { createShop } from './shop-creation.js';
 export { takeNumber, COUNTER_STARTS, type CounterKind } from './shop-counters.js';
