@@ -22,14 +22,15 @@ export const checks = [
     run: commandCheck([tool('prettier/bin/prettier.cjs'), '--check', '.', '--log-level=warn']),
   },
   { name: 'styles', run: commandCheck(['infra/run/check-styles.mjs']) },
+  { name: 'build-common', run: buildCheck('common') },
   {
     name: 'imports',
+    after: ['build-common'],
     run: commandCheck([
       tool('dependency-cruiser/bin/dependency-cruise.mjs'),
       ...['packages', 'infra', '--config', '.dependency-cruiser.mjs', '--output-type', 'err'],
     ]),
   },
-  { name: 'build-common', run: buildCheck('common') },
   { name: 'common', run: jestCheck('packages/common', 1) },
   { name: 'types-common', run: types('packages/common/tsconfig.spec.json') },
   { name: 'build-server', after: ['build-common'], run: buildCheck('server') },
