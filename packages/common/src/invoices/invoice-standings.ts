@@ -22,3 +22,8 @@ export type PaymentMethod = z.infer<typeof paymentMethodSchema>;
 export const RECORDED_METHODS = ['check', 'cash', 'transfer'] as const;
 export const recordedMethodSchema = z.enum(RECORDED_METHODS, { error: 'Choose how it was paid.' });
 export type RecordedMethod = z.infer<typeof recordedMethodSchema>;
+
+/** What a record of money is: received, a wrong record taken back, or what came beyond the debt given back. */
+export const PAYMENT_KINDS = ['payment', 'reversal', 'refund'] as const;
+export const paymentKindSchema = z.enum(PAYMENT_KINDS);
+export type PaymentKind = z.infer<typeof paymentKindSchema>;

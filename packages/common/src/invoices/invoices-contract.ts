@@ -15,10 +15,12 @@ import {
   versionSchema,
 } from '../wire/fields.js';
 import { listQuerySchema, pageSchema } from '../wire/list.js';
+import { agingBucketsSchema } from './aging-contract.js';
 import {
   invoiceKindSchema,
   invoiceStandingSchema,
   invoiceStatusSchema,
+  paymentKindSchema,
   paymentMethodSchema,
   recordedMethodSchema,
 } from './invoice-standings.js';
@@ -82,6 +84,20 @@ export const recordPaymentSchema = z.strictObject({
 });
 export type RecordPayment = z.infer<typeof recordPaymentSchema>;
 
+/** A payment is never changed: a wrong one is taken back by a record of its own, then entered again. */
+export const reversePaymentSchema = z.strictObject({ reason: paragraphSchema(300, 'The reason') });
+export type ReversePayment = z.infer<typeof reversePaymentSchema>;
+
+/** What came beyond the debt is given back, by whatever way. */
+export const refundOverpaymentSchema = z.strictObject({
+  method: paymentMethodSchema,
+  amountCents: positiveCentsSchema,
+  /** The day it went out. */
+  paidOn: dateSchema,
+  reference: optionalLineSchema(80, 'The reference'),
+});
+export type RefundOverpayment = z.infer<typeof refundOverpaymentSchema>;
+
 /** An amount with its tax, or the whole open balance when left out. What was paid is refunded, not credited. */
 export const creditInvoiceSchema = z.strictObject({
   amountCents: positiveCentsSchema.optional(),
@@ -89,12 +105,25 @@ export const creditInvoiceSchema = z.strictObject({
 });
 export type CreditInvoice = z.infer<typeof creditInvoiceSchema>;
 
+/** To whom a credit note or a receipt goes; the words are the letter's own. */
+export const sendDocumentSchema = z.strictObject({ to: emailSchema });
+export type SendDocument = z.infer<typeof sendDocumentSchema>;
+
 export const paymentSchema = z.object({
   id: idSchema,
+  kind: paymentKindSchema,
   method: paymentMethodSchema,
+  /** Below zero in a reversal and in a refund. */
   amountCents: centsSchema,
+  /** The part that pays the invoice; the rest was more than was owed and is held for the customer. */
+  appliedCents: centsSchema,
   receivedOn: dateSchema,
   reference: z.string(),
+  reversesId: idSchema.nullable(),
+  reversedById: idSchema.nullable(),
+  /** Why it was taken back; empty otherwise. */
+  reason: z.string(),
+  /** Null when the payment provider's word recorded it. */
   recordedBy: z.string().nullable(),
   createdAt: instantSchema,
 });
@@ -111,7 +140,17 @@ export const creditNoteSchema = z.object({
 });
 export type CreditNote = z.infer<typeof creditNoteSchema>;
 
-export const invoiceSendSchema = z.object({ id: idSchema, to: z.string(), sentAt: instantSchema });
+/** What a letter about an invoice carries. */
+export const INVOICE_DOCUMENT_KINDS = ['invoice', 'credit-note', 'payment-receipt'] as const;
+export const invoiceDocumentKindSchema = z.enum(INVOICE_DOCUMENT_KINDS);
+export type InvoiceDocumentKind = z.infer<typeof invoiceDocumentKindSchema>;
+
+export const invoiceSendSchema = z.object({
+  id: idSchema,
+  document: invoiceDocumentKindSchema,
+  to: z.string(),
+  sentAt: instantSchema,
+});
 export type InvoiceSend = z.infer<typeof invoiceSendSchema>;
 
 const amounts = {
@@ -120,7 +159,10 @@ const amounts = {
   totalCents: centsSchema,
   paidCents: centsSchema,
   creditedCents: centsSchema,
+  /** What is owed: zero while it is a draft. */
   balanceCents: centsSchema,
+  /** What came by card beyond what was owed, and was not given back yet. */
+  overpaidCents: centsSchema,
 };
 const place = {
   status: invoiceStatusSchema,
@@ -167,6 +209,7 @@ export const invoiceRowSchema = z.object({
   createdAt: instantSchema,
   totalCents: centsSchema,
   balanceCents: centsSchema,
+  overpaidCents: centsSchema,
 });
 export type InvoiceRow = z.infer<typeof invoiceRowSchema>;
 export const invoicePageSchema = pageSchema(invoiceRowSchema);
@@ -181,6 +224,23 @@ export const invoiceListQuerySchema = listQuerySchema(INVOICE_SORT_KEYS).extend(
   issuedTo: dateSchema.optional(),
 });
 export type InvoiceListQuery = z.infer<typeof invoiceListQuerySchema>;
+
+/** The head of the list: all that is owed by age, for the whole shop or one customer or job. */
+export const invoiceTotalsQuerySchema = z.strictObject({
+  customerId: idSchema.optional(),
+  jobId: idSchema.optional(),
+});
+export type InvoiceTotalsQuery = z.infer<typeof invoiceTotalsQuerySchema>;
+export const invoiceListTotalsSchema = z.object({
+  on: dateSchema,
+  aging: agingBucketsSchema,
+  overdueCents: centsSchema,
+  openCount: z.int(),
+  overdueCount: z.int(),
+  draftCents: centsSchema,
+  draftCount: z.int(),
+});
+export type InvoiceListTotals = z.infer<typeof invoiceListTotalsSchema>;
 
 /** Every payment of the shop, newest first: what the bookkeeper lays beside the bank's list. */
 export const paymentRowSchema = paymentSchema.extend({

@@ -8,6 +8,8 @@ export const ENTRY_KINDS = [
   'invoice',
   'deposit-earned',
   'payment',
+  'payment-reversal',
+  'refund',
   'credit-note',
 ] as const;
 export const entryKindSchema = z.enum(ENTRY_KINDS);
@@ -92,6 +94,8 @@ export const accountActivityRowSchema = z.object({
   source: entrySourceSchema,
   side: ledgerSideSchema,
   amountCents: centsSchema,
+  /** The account's balance after this line, on its normal side. */
+  balanceCents: centsSchema,
 });
 export type AccountActivityRow = z.infer<typeof accountActivityRowSchema>;
 
