@@ -26,7 +26,8 @@ import { placeFieldProblems } from './field-problems';
       <bm-problem-note [problem]="refused" />
     }
   `,
-  styles: ':host { display: block; } bm-problem-note { margin-bottom: 16px; }',
+  styles: ':host:not([hidden]) { display: block; margin-bottom: 16px; }',
+  host: { '[hidden]': '!problem()' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class FormErrors {
