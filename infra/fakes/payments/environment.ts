@@ -1,0 +1,30 @@
+import type { PaymentsFakeOptions, PriceSeed } from './options.js';
+import type { Endpoint } from './webhooks/endpoint.js';
+
+type Environment = Record<string, string | undefined>;
+
+/** Webhook addresses are separated by commas and share one secret; without a secret nothing is sent. */
+function endpointsFrom(env: Environment): Endpoint[] {
+  const secret = env['PAYMENTS_FAKE_WEBHOOK_SECRET'];
+  const urls = (env['PAYMENTS_FAKE_WEBHOOK_URL'] ?? '').split(',').map((url) => url.trim());
+  if (!secret) return [];
+  return urls.filter((url) => url !== '').map((url) => ({ url, secret, sends: 'all' }));
+}
+
+function pricesFrom(env: Environment): PriceSeed[] | undefined {
+  const text = env['PAYMENTS_FAKE_PRICES'];
+  return text ? (JSON.parse(text) as PriceSeed[]) : undefined;
+}
+
+/** The options that PAYMENTS_FAKE_* variables give; README.md lists them. */
+export function optionsFromEnvironment(env: Environment): PaymentsFakeOptions {
+  return {
+    port: Number(env['PAYMENTS_FAKE_PORT'] ?? '4242'),
+    host: env['PAYMENTS_FAKE_HOST'] ?? '127.0.0.1',
+    key: env['PAYMENTS_FAKE_KEY'],
+    publicUrl: env['PAYMENTS_FAKE_PUBLIC_URL'],
+    stateFile: env['PAYMENTS_FAKE_STATE_FILE'],
+    webhooks: endpointsFrom(env),
+    prices: pricesFrom(env),
+  };
+}

@@ -1,0 +1,16 @@
+import { TEST_CARDS } from '../cards.js';
+import { html, type Html } from './html.js';
+
+/** The test cards to choose from; `chosen` is the one kept after an error. */
+export function cardChoice(chosen: string): Html {
+  const radios = TEST_CARDS.map((card) => {
+    const checked = card.name === chosen ? html` checked` : null;
+    return html`<label
+      ><input type="radio" name="card" value="${card.name}" ${checked} required /> ${card.label}</label
+    > `;
+  });
+  return html`<fieldset>
+    <legend>Card</legend>
+    ${radios}
+  </fieldset>`;
+}
