@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { MAX_PRICE_CENTS } from '../money/cents.js';
 import {
   centsSchema,
   dateSchema,
@@ -43,8 +44,6 @@ export const estimateLineSchema = z.strictObject({
 });
 export type EstimateLine = z.infer<typeof estimateLineSchema>;
 
-/** Half of MAX_CENTS would do for the highest tax rate; a round figure is easier to say. */
-export const MAX_PRICE_CENTS = 4_000_000_000;
 export const MAX_PLANNED_MINUTES = 6_000_000;
 export const MAX_ROOMS = 60;
 export const MAX_LINES_PER_ROOM = 200;

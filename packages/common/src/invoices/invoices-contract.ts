@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { MAX_PRICE_CENTS } from '../money/cents.js';
 import {
   centsSchema,
   dateSchema,
@@ -37,7 +38,19 @@ export const invoiceLineSchema = z.strictObject({
 });
 export type InvoiceLine = z.infer<typeof invoiceLineSchema>;
 
-const linesSchema = z.array(invoiceLineSchema).max(200, 'An invoice can have at most 200 lines.');
+const linesSchema = z
+  .array(invoiceLineSchema)
+  .max(200, 'An invoice can have at most 200 lines.')
+  .refine(
+    (lines) => new Set(lines.map((line) => line.id)).size === lines.length,
+    'Every line needs an id of its own.',
+  )
+  .refine((lines) => upperBound(lines) <= MAX_PRICE_CENTS, 'An invoice can be at most $40,000,000.');
+
+/** Keeps every sum of an invoice inside MAX_CENTS; no rounding is done here. */
+function upperBound(lines: InvoiceLine[]): number {
+  return lines.reduce((sum, line) => sum + Number(line.quantity) * Math.abs(line.unitPriceCents), 0);
+}
 
 /**
  * A draft comes from a stage of a job's billing schedule, whose net and tax it takes over as they were accepted, or it

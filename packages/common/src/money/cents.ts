@@ -9,6 +9,9 @@ export type Rate = string;
 /** The largest amount any field takes: 99,999,999.99, so that sums of thousands of rows stay safe integers. */
 export const MAX_CENTS: Cents = 9_999_999_999;
 
+/** The largest price of one document, $40 million: even doubled by tax it stays within MAX_CENTS. */
+export const MAX_PRICE_CENTS: Cents = 4_000_000_000;
+
 /** Rounds half away from zero, the rule of US sales tax statutes (SSUTA section 324) applied to both signs. */
 export function roundHalfUp(value: Decimal): number {
   return value.toDecimalPlaces(0, Decimal.ROUND_HALF_UP).toNumber();
