@@ -9,6 +9,15 @@ import { Person } from './features/accounts/person.entity.js';
 import { PersonToken } from './features/accounts/person-token.entity.js';
 import { Customer } from './features/customers/customer.entity.js';
 import { Site } from './features/customers/site.entity.js';
+import { CustomerLink } from './features/customer-page/customer-link.entity.js';
+import { Estimate } from './features/estimates/estimate.entity.js';
+import { EstimateAcceptance } from './features/estimates/estimate-acceptance.entity.js';
+import { EstimateBillingStage } from './features/estimates/estimate-billing-stage.entity.js';
+import { EstimateLine } from './features/estimates/estimate-line.entity.js';
+import { EstimateQuestion } from './features/estimates/estimate-question.entity.js';
+import { EstimateRevision } from './features/estimates/estimate-revision.entity.js';
+import { EstimateRoom } from './features/estimates/estimate-room.entity.js';
+import { EstimateSend } from './features/estimates/estimate-send.entity.js';
 import { Job } from './features/jobs/job.entity.js';
 import { JobAssignment } from './features/jobs/job-assignment.entity.js';
 import { JobBillingStage } from './features/jobs/job-billing-stage.entity.js';
@@ -45,6 +54,17 @@ export const ENTITIES: readonly EntityClass[] = [
   // customers
   Customer,
   Site,
+  // estimates
+  Estimate,
+  EstimateRevision,
+  EstimateRoom,
+  EstimateLine,
+  EstimateBillingStage,
+  EstimateSend,
+  EstimateAcceptance,
+  EstimateQuestion,
+  // customer-page
+  CustomerLink,
   // jobs
   Job,
   JobAssignment,
@@ -57,4 +77,9 @@ export const ENTITIES: readonly EntityClass[] = [
 ];
 
 /** Tables in which nothing is ever changed or removed: the application's database account may only read and insert. */
-export const APPEND_ONLY_TABLES: readonly string[] = ['audit_entry', 'job_cost', 'job_stage_change'];
+export const APPEND_ONLY_TABLES: readonly string[] = [
+  'audit_entry',
+  'estimate_acceptance',
+  'job_cost',
+  'job_stage_change',
+];
