@@ -1,6 +1,10 @@
 import * as z from 'zod';
 import { addressSchema } from '../customers/customers-contract.js';
-import { billingDueSchema } from '../estimates/billing-schedule-contract.js';
+import {
+  billingDueSchema,
+  billingShareSchema,
+  defaultBillingScheduleSchema,
+} from '../estimates/billing-schedule-contract.js';
 import { costCategorySchema } from '../estimates/cost-categories.js';
 import { invoiceStandingSchema } from '../invoices/invoice-standings.js';
 import {
@@ -9,7 +13,9 @@ import {
   idSchema,
   instantSchema,
   lineSchema,
+  nonNegativeCentsSchema,
   notesSchema,
+  optionalLineSchema,
   versionSchema,
 } from '../wire/fields.js';
 import { listQuerySchema, pageSchema } from '../wire/list.js';
@@ -28,7 +34,7 @@ export const JOB_STAGES = [
 export const jobStageSchema = z.enum(JOB_STAGES, { error: 'Choose a stage.' });
 export type JobStage = z.infer<typeof jobStageSchema>;
 
-/** A job begins with the acceptance of an estimate; these are its own fields. */
+/** A job begins with the acceptance of an estimate, or by hand; these are its own fields. */
 export const jobFieldsSchema = z.strictObject({
   title: lineSchema(120, 'The title'),
   installOn: dateSchema.nullable().default(null),
@@ -39,12 +45,48 @@ export const jobFieldsSchema = z.strictObject({
 export const updateJobSchema = patchSchema(jobFieldsSchema);
 export type UpdateJob = z.infer<typeof updateJobSchema>;
 
+const MAX_PLANNED_MINUTES = 600_000;
+/** A job taken on without an estimate: repeat work, whose price and plan are known. */
+export const createJobSchema = jobFieldsSchema.extend({
+  customerId: idSchema,
+  siteId: idSchema.nullable().default(null),
+  /** The agreed price without tax, and its tax; both zero for work that is not billed. */
+  contractNetCents: nonNegativeCentsSchema.default(0),
+  contractTaxCents: nonNegativeCentsSchema.default(0),
+  /** Planned time by operation. It is planned to cost the operation's own rate, in its own category. */
+  operations: z
+    .array(
+      z.strictObject({
+        operationId: idSchema,
+        plannedMinutes: z.int('Give whole minutes.').min(1).max(MAX_PLANNED_MINUTES, 'This is too long.'),
+      }),
+    )
+    .max(100, 'A job can plan at most 100 operations.')
+    .refine((rows) => allDistinct(rows.map((row) => row.operationId)), 'Plan each operation once.')
+    .default([]),
+  /** Planned cost by category, besides that time. */
+  plannedCosts: z
+    .array(z.strictObject({ category: costCategorySchema, plannedCents: nonNegativeCentsSchema }))
+    .refine((rows) => allDistinct(rows.map((row) => row.category)), 'Plan each category once.')
+    .default([]),
+  /** The shop's own schedule when left out. */
+  billingSchedule: defaultBillingScheduleSchema.optional(),
+});
+export type CreateJob = z.infer<typeof createJobSchema>;
+export type CreateJobInput = z.input<typeof createJobSchema>;
+
+function allDistinct(values: readonly string[]): boolean {
+  return new Set(values).size === values.length;
+}
+
 // Commands. Each carries If-Match.
 
 export const moveJobSchema = z.strictObject({
   stage: jobStageSchema,
   /** Said by the person when stages are skipped; without it a skip is refused with the stages named. */
   confirmSkip: z.boolean().default(false),
+  /** Why a job is closed although a billing stage is not billed; without it that is refused. */
+  reason: optionalLineSchema(300, 'The reason'),
 });
 export type MoveJob = z.infer<typeof moveJobSchema>;
 
@@ -60,6 +102,8 @@ export const jobOperationSchema = z.object({
   name: z.string(),
   plannedMinutes: z.int(),
   clockedMinutes: z.int(),
+  /** The part of it that falls in the shop's current workweek. */
+  thisWeekMinutes: z.int(),
   // money
   plannedCostCents: centsSchema.optional(),
   actualCostCents: centsSchema.optional(),
@@ -78,6 +122,7 @@ export type JobCostRow = z.infer<typeof jobCostRowSchema>;
 export const jobBillingRowSchema = z.object({
   billingStageId: idSchema,
   name: z.string(),
+  share: billingShareSchema,
   deposit: z.boolean(),
   due: billingDueSchema,
   plannedCents: centsSchema,
@@ -120,6 +165,16 @@ export const jobMoneySchema = z.object({
 });
 export type JobMoney = z.infer<typeof jobMoneySchema>;
 
+/** One step of the job from stage to stage. */
+export const stageChangeSchema = z.object({
+  stage: jobStageSchema,
+  at: instantSchema,
+  /** Null when the customer's acceptance began the job. */
+  by: z.string().nullable(),
+  reason: z.string(),
+});
+export type StageChange = z.infer<typeof stageChangeSchema>;
+
 export const jobSchema = z.object({
   id: idSchema,
   version: versionSchema,
@@ -127,12 +182,12 @@ export const jobSchema = z.object({
   title: z.string(),
   customer: z.object({ id: idSchema, name: z.string() }),
   site: z.object({ id: idSchema, name: z.string(), address: addressSchema, notes: z.string() }).nullable(),
-  /** One step back. Its price is not here, only the way to it for who may read it. */
-  estimateId: idSchema,
-  estimateNumber: z.int(),
-  revisionNumber: z.int(),
+  /** One step back. Its price is not here, only the way to it for who may read it. Null for repeat work. */
+  estimate: z.object({ id: idSchema, number: z.int(), revisionNumber: z.int() }).nullable(),
   stage: jobStageSchema,
   stageChangedAt: instantSchema,
+  /** Oldest first. */
+  stageHistory: z.array(stageChangeSchema),
   installOn: dateSchema.nullable(),
   openToCrew: z.boolean(),
   assignedMembers: z.array(z.object({ memberId: idSchema, name: z.string() })),
@@ -175,5 +230,12 @@ export const jobListQuerySchema = listQuerySchema(JOB_SORT_KEYS).extend({
   /** `me`, or a member's id. */
   assigned: z.union([z.literal('me'), idSchema]).optional(),
   customerId: idSchema.optional(),
+  /** Days of the install date, both included. */
+  installFrom: dateSchema.optional(),
+  installTo: dateSchema.optional(),
 });
 export type JobListQuery = z.infer<typeof jobListQuerySchema>;
+
+/** The whole list as CSV: the list's filters and order, without pages. */
+export const jobExportQuerySchema = jobListQuerySchema.omit({ after: true, limit: true });
+export type JobExportQuery = z.infer<typeof jobExportQuerySchema>;
