@@ -25,7 +25,7 @@ import { shopSlugOf } from './platform/session/address';
 import { CurrentShop } from './platform/session/current-shop';
 import { provideSession } from './platform/session/session.providers';
 import { registerIcons } from './ui/icons/register-icons';
-import { SHOP_UNITS, SHOP_ZONE } from './ui/formats/shop-settings';
+import { SHOP_CURRENCY, SHOP_UNITS, SHOP_ZONE } from './ui/formats/shop-settings';
 
 const formFields: MatFormFieldDefaultOptions = {
   appearance: 'outline',
@@ -50,6 +50,7 @@ export const appConfig: ApplicationConfig = {
     { provide: TitleStrategy, useExisting: PageTitle },
     { provide: MAT_FORM_FIELD_DEFAULT_OPTIONS, useValue: formFields },
     { provide: SESSION_RENEWAL, useFactory: sessionRenewal },
+    { provide: SHOP_CURRENCY, useFactory: () => inject(CurrentShop).currency },
     { provide: SHOP_ZONE, useFactory: () => inject(CurrentShop).timeZone },
     { provide: SHOP_UNITS, useFactory: () => inject(CurrentShop).unitSystem },
   ],

@@ -10,6 +10,7 @@ export class CurrentShop {
   readonly name = computed(() => this.membership()?.shopName ?? null);
   readonly timeZone = computed(() => this.membership()?.timeZone ?? 'UTC');
   readonly unitSystem = computed(() => this.membership()?.unitSystem ?? 'inch');
+  readonly currency = computed(() => this.membership()?.currency ?? 'USD');
   /** A lapsed subscription leaves everything readable and nothing changeable. */
   readonly readOnly = computed(() => this.membership()?.subscription.access === 'read-only');
 

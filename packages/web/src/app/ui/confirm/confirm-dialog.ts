@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
-import { FormControl, ReactiveFormsModule, Validators } from '@angular/forms';
+import { FormControl, FormGroup, ReactiveFormsModule, Validators } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import {
   MAT_DIALOG_DATA,
@@ -29,13 +29,13 @@ import type { ConfirmAnswer, ConfirmQuestion } from './confirm';
   ],
   template: `
     <h2 mat-dialog-title>{{ question.title }}</h2>
-    <form (submit)="agree(); $event.preventDefault()">
+    <form [formGroup]="form" (ngSubmit)="agree()">
       <mat-dialog-content>
         <p>{{ question.text }}</p>
         @if (question.reason; as asked) {
           <mat-form-field class="reason">
             <mat-label>{{ asked.label }}</mat-label>
-            <textarea matInput rows="2" maxlength="500" [formControl]="reason"></textarea>
+            <textarea matInput rows="2" maxlength="500" formControlName="reason"></textarea>
             <mat-error>Say why, in a few words.</mat-error>
           </mat-form-field>
         }
@@ -54,13 +54,15 @@ import type { ConfirmAnswer, ConfirmQuestion } from './confirm';
 export class ConfirmDialog {
   protected readonly question = inject<ConfirmQuestion>(MAT_DIALOG_DATA);
   private readonly dialog = inject<MatDialogRef<ConfirmDialog, ConfirmAnswer>>(MatDialogRef);
-  protected readonly reason = new FormControl('', {
-    nonNullable: true,
-    validators: this.question.reason?.required ? [Validators.required, Validators.pattern(/\S/)] : [],
+  protected readonly form = new FormGroup({
+    reason: new FormControl('', {
+      nonNullable: true,
+      validators: this.question.reason?.required ? [Validators.required, Validators.pattern(/\S/)] : [],
+    }),
   });
 
   protected agree(): void {
-    this.reason.markAsTouched();
-    if (this.reason.valid) this.dialog.close({ reason: this.reason.value.trim() });
+    this.form.markAllAsTouched();
+    if (this.form.valid) this.dialog.close({ reason: this.form.getRawValue().reason.trim() });
   }
 }

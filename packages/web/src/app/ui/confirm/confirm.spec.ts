@@ -1,6 +1,7 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
+import { MATERIAL_ANIMATIONS } from '@angular/material/core';
 import { MatButtonHarness } from '@angular/material/button/testing';
 import { MatDialogHarness } from '@angular/material/dialog/testing';
 import { MatInputHarness } from '@angular/material/input/testing';
@@ -14,6 +15,9 @@ class Host {
 const question: ConfirmQuestion = { title: 'Archive Wren?', text: 'It leaves the lists.', action: 'Archive' };
 
 async function ask(asked: ConfirmQuestion) {
+  TestBed.configureTestingModule({
+    providers: [{ provide: MATERIAL_ANIMATIONS, useValue: { animationsDisabled: true } }],
+  });
   const fixture = TestBed.createComponent(Host);
   const loader = TestbedHarnessEnvironment.documentRootLoader(fixture);
   const answers: (ConfirmAnswer | undefined)[] = [];
@@ -35,6 +39,7 @@ describe('Confirm', () => {
     const first = await ask(question);
     await first.press('Cancel');
     expect(first.answers).toEqual([undefined]);
+    TestBed.resetTestingModule();
     const second = await ask(question);
     await second.dialog.close();
     expect(second.answers).toEqual([undefined]);

@@ -1,55 +1,64 @@
-import { dateText } from './date-text';
-import { durationText, hoursText } from './duration-text';
-import { moneyText } from './money-text';
+import { signal } from '@angular/core';
+import { TestBed } from '@angular/core/testing';
+import { DateTextPipe } from './date-text.pipe';
+import { DurationPipe } from './duration.pipe';
+import { MoneyPipe } from './money.pipe';
+import { SHOP_CURRENCY, SHOP_ZONE } from './shop-settings';
 
-const NOW = new Date('2026-06-01T12:00:00Z');
+beforeEach(() => {
+  TestBed.configureTestingModule({
+    providers: [
+      DateTextPipe,
+      DurationPipe,
+      MoneyPipe,
+      { provide: SHOP_ZONE, useValue: signal('America/New_York') },
+      { provide: SHOP_CURRENCY, useValue: signal('USD') },
+    ],
+  });
+});
 
-describe('moneyText', () => {
-  it('writes cents exactly, whole for reading at a glance, or bare for a table', () => {
-    expect(moneyText(125_000)).toBe('$1,250.00');
-    expect(moneyText(125_049, 'whole')).toBe('$1,250');
-    expect(moneyText(125_000, 'bare')).toBe('1,250.00');
+describe('money', () => {
+  const money: MoneyPipe['transform'] = (...args) => TestBed.inject(MoneyPipe).transform(...args);
+
+  it('writes cents exactly, whole for reading at a glance, bare for a table, and as a difference', () => {
+    expect(money(125_049)).toBe('$1,250.49');
+    expect(money(125_050, 'whole')).toBe('$1,251');
+    expect(money(125_049, 'bare')).toBe('1,250.49');
+    expect(money(10_800, 'difference')).toBe('+$108.00');
   });
 
-  it('puts a true minus before the currency', () => {
-    expect(moneyText(-11_900)).toBe('\u2212$119.00');
+  it('writes below zero with a true minus, and never a negative zero', () => {
+    expect(money(-11_950, 'whole')).toBe('\u2212$120');
+    expect(money(-40, 'whole')).toBe('$0');
   });
 
-  it('signs a difference, and nothing when there is none', () => {
-    expect(moneyText(10_800, 'signed-whole')).toBe('+$108');
-    expect(moneyText(-10_800, 'signed')).toBe('\u2212$108.00');
-    expect(moneyText(0, 'signed')).toBe('$0.00');
+  it('writes nothing for what is not there', () => {
+    expect(money(undefined)).toBe('');
   });
 });
 
 describe('dateText', () => {
+  const dateText: DateTextPipe['transform'] = (...args) => TestBed.inject(DateTextPipe).transform(...args);
+  beforeEach(() => jest.useFakeTimers({ now: new Date('2026-06-01T12:00:00Z') }));
+  afterEach(() => jest.useRealTimers());
+
   it('writes a date without a zone as it stands', () => {
-    expect(dateText('2026-01-15', 'America/Los_Angeles', 'day', NOW)).toBe('Thu, Jan 15');
+    expect(dateText('2026-01-15')).toBe('Thu, Jan 15');
+    expect(dateText('2025-01-14')).toBe('Tue, Jan 14, 2025');
   });
 
-  it('names the year when it is not the present one', () => {
-    expect(dateText('2025-01-14', 'UTC', 'day', NOW)).toBe('Tue, Jan 14, 2025');
-  });
-
-  it('shows an instant on the day and at the time it has in the zone', () => {
-    expect(dateText('2026-01-15T03:31:00Z', 'America/New_York', 'day-and-time', NOW)).toBe(
-      'Wed, Jan 14, 10:31 pm',
-    );
-    expect(dateText('2026-07-15T13:31:00Z', 'America/New_York', 'time', NOW)).toBe('9:31 am');
+  it('shows an instant on the day and at the time it has in the shop', () => {
+    expect(dateText('2026-01-15T03:31:00Z')).toBe('Wed, Jan 14');
+    expect(dateText('2026-01-15T03:31:00Z', 'day-and-time')).toBe('Wed, Jan 14, 10:31 pm');
+    expect(dateText('2026-07-15T13:31:00Z', 'time')).toBe('9:31 am');
   });
 });
 
-describe('durationText', () => {
-  it('reads as a clock does', () => {
-    expect(durationText(134)).toBe('2 h 14 m');
-    expect(durationText(120)).toBe('2 h');
-    expect(durationText(9)).toBe('9 m');
-    expect(durationText(0)).toBe('0 m');
-    expect(durationText(-75)).toBe('\u22121 h 15 m');
-  });
-
-  it('reads as hours in a column', () => {
-    expect(hoursText(450)).toBe('7.5 h');
-    expect(hoursText(-90)).toBe('\u22121.5 h');
+describe('duration', () => {
+  it('reads as a clock does, or as hours in a column', () => {
+    const pipe = TestBed.inject(DurationPipe);
+    expect(pipe.transform(134)).toBe('2 h 14 m');
+    expect(pipe.transform(450, 'hours')).toBe('7.5 h');
+    expect(pipe.transform(null)).toBe('');
   });
 });

@@ -1,28 +1,26 @@
+import { formatAmount, formatDifference, formatMoney } from '@bookmatch/common/money/format';
 import type { Cents } from '@bookmatch/common/money/cents';
-
-const MINUS = '\u2212';
-const dollars = new Intl.NumberFormat('en-US', { style: 'currency', currency: 'USD' });
-const wholeDollars = new Intl.NumberFormat('en-US', {
-  style: 'currency',
-  currency: 'USD',
-  maximumFractionDigits: 0,
-});
-const bare = new Intl.NumberFormat('en-US', { minimumFractionDigits: 2, maximumFractionDigits: 2 });
 
 /**
  * How an amount is written: `exact` $1,250.00 · `whole` $1,250, for reading at a glance · `bare` 1,250.00, where the
- * table says the currency once · `signed` +$108.00, for a difference.
+ * table says the currency once · `difference` +$108.00.
  */
-export type MoneyStyle = 'exact' | 'whole' | 'bare' | 'signed' | 'signed-whole';
+export type MoneyStyle = 'exact' | 'whole' | 'bare' | 'difference';
 
-/** @param cents whole cents; negative gets a true minus, never a hyphen */
-export function moneyText(cents: Cents, style: MoneyStyle = 'exact'): string {
-  const amount = unsigned(Math.abs(cents) / 100, style);
-  if (cents < 0) return MINUS + amount;
-  return style.startsWith('signed') && cents > 0 ? `+${amount}` : amount;
+export function moneyText(cents: Cents, currency: string, style: MoneyStyle = 'exact'): string {
+  switch (style) {
+    case 'exact':
+      return formatMoney(cents, currency);
+    case 'whole':
+      return formatMoney(wholeDollars(cents), currency).replace(/\.00$/, '');
+    case 'bare':
+      return formatAmount(cents);
+    case 'difference':
+      return formatDifference(cents, currency);
+  }
 }
 
-function unsigned(amount: number, style: MoneyStyle): string {
-  if (style === 'bare') return bare.format(amount);
-  return (style === 'whole' || style === 'signed-whole' ? wholeDollars : dollars).format(amount);
+/** Half away from zero, as everywhere. */
+function wholeDollars(cents: Cents): Cents {
+  return Math.sign(cents) * Math.round(Math.abs(cents) / 100) * 100;
 }

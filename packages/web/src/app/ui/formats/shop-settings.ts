@@ -12,3 +12,9 @@ export const SHOP_UNITS = new InjectionToken<Signal<UnitSystem>>('SHOP_UNITS', {
   providedIn: 'root',
   factory: () => signal<UnitSystem>('inch'),
 });
+
+/** ISO 4217, as the shop charges. */
+export const SHOP_CURRENCY = new InjectionToken<Signal<string>>('SHOP_CURRENCY', {
+  providedIn: 'root',
+  factory: () => signal('USD'),
+});

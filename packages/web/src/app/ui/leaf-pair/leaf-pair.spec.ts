@@ -15,7 +15,7 @@ async function open() {
   const fixture = TestBed.createComponent(LeafPair);
   fixture.componentRef.setInput('label', 'Cost by kind');
   fixture.componentRef.setInput('rows', ROWS);
-  fixture.componentRef.setInput('format', (cents: number) => moneyText(cents, 'whole'));
+  fixture.componentRef.setInput('format', (cents: number) => moneyText(cents, 'USD', 'whole'));
   const pair = await TestbedHarnessEnvironment.harnessForFixture(fixture, LeafPairHarness);
   return { fixture, pair, element: fixture.nativeElement as HTMLElement };
 }

@@ -1,7 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import { MINUS } from '@bookmatch/common/money/format';
 import { leafBars, leafScale, leafTone, type LeafRow } from './leaf-row';
-
-const MINUS = '\u2212';
 
 /**
  * The mirrored pair: what was planned to the left of the spine, what was built to the right, what ran over in red at

@@ -61,7 +61,7 @@ describe('MoneyInput', () => {
     await input.blur();
     expect(price.valid).toBe(false);
     expect(await input.getValue()).toBe('twelve');
-    expect(await field.getTextErrors()).toEqual(['Give an amount, such as 1,250.00.']);
+    expect(await field.getTextErrors()).toEqual(['Give an amount, such as 1,250 or 1250.00.']);
   });
 
   it('is well again once it can be read', async () => {

@@ -7,8 +7,8 @@ import {
   type Validator,
 } from '@angular/forms';
 import type { Cents } from '@bookmatch/common/money/cents';
-import { moneyText } from '../formats/money-text';
-import { parseMoney } from './parse-money';
+import { formatAmount } from '@bookmatch/common/money/format';
+import { parseMoney } from '@bookmatch/common/money/parse';
 
 /**
  * Money in a text field: `<input matInput bmMoneyInput formControlName="priceCents">` holds whole cents or null, takes
@@ -30,14 +30,14 @@ import { parseMoney } from './parse-money';
 })
 export class MoneyInput implements ControlValueAccessor, Validator {
   private readonly input = inject<ElementRef<HTMLInputElement>>(ElementRef).nativeElement;
-  private unreadable = false;
+  private problem: string | null = null;
   private onChange: (cents: Cents | null) => void = () => undefined;
   private onTouched: () => void = () => undefined;
   private onValidity: () => void = () => undefined;
 
   writeValue(cents: Cents | null): void {
-    this.unreadable = false;
-    this.input.value = cents === null ? '' : moneyText(cents, 'bare');
+    this.problem = null;
+    this.input.value = cents === null ? '' : formatAmount(cents);
   }
 
   registerOnChange(onChange: (cents: Cents | null) => void): void {
@@ -57,19 +57,24 @@ export class MoneyInput implements ControlValueAccessor, Validator {
   }
 
   validate(): ValidationErrors | null {
-    return this.unreadable ? { problem: 'Give an amount, such as 1,250.00.' } : null;
+    return this.problem === null ? null : { problem: this.problem };
   }
 
   protected read(): void {
-    const cents = parseMoney(this.input.value);
-    this.unreadable = cents === undefined;
-    this.onChange(cents ?? null);
+    const reading = this.reading();
+    this.problem = 'problem' in reading ? reading.problem : null;
+    this.onChange('problem' in reading ? null : reading.cents);
     this.onValidity();
   }
 
   protected settle(): void {
-    const cents = parseMoney(this.input.value);
-    if (cents !== undefined) this.writeValue(cents);
+    const reading = this.reading();
+    if (!('problem' in reading)) this.writeValue(reading.cents);
     this.onTouched();
+  }
+
+  /** An empty field is no amount; whether one is needed is for the form to say. */
+  private reading(): { cents: Cents | null } | { problem: string } {
+    return this.input.value.trim() === '' ? { cents: null } : parseMoney(this.input.value);
   }
 }
