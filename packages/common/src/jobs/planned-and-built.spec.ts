@@ -83,11 +83,10 @@ describe('progress', () => {
   });
 
   it('stays between nothing and all of the contract, for any costs', () => {
-    const cents = fc.integer({ min: -100_000, max: 100_000_000 });
     const row = fc.record({
       category: fc.constantFrom(...COST_CATEGORIES),
       plannedCents: fc.nat(100_000_000),
-      actualCents: cents,
+      actualCents: fc.nat(100_000_000),
     });
     fc.assert(
       fc.property(fc.array(row), fc.nat(1_000_000_000), fc.boolean(), (costs, contractNetCents, closed) => {

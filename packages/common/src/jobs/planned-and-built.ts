@@ -1,7 +1,6 @@
-import { Decimal } from 'decimal.js';
 import { COST_CATEGORIES, type CostCategory } from '../estimates/cost-categories.js';
-import { roundHalfUp, sumCents, type Cents } from '../money/cents.js';
-import { ratio } from '../money/ratio.js';
+import { sumCents, type Cents } from '../money/cents.js';
+import { costProgress, earned, overBilled, type CostProgress } from './cost-to-cost.js';
 import type { JobCostRow } from './jobs-contract.js';
 
 export type PlannedCost = { category: CostCategory; plannedCents: Cents };
@@ -18,16 +17,7 @@ export function costRows(planned: readonly PlannedCost[], actual: readonly Actua
   }));
 }
 
-export type Progress = {
-  plannedCostCents: Cents;
-  actualCostCents: Cents;
-  /** What the job is on pace for: what was spent and what is still to go. */
-  expectedCostCents: Cents;
-  /** A decimal to four places; null when nothing was planned. */
-  percentComplete: string | null;
-  earnedCents: Cents;
-  overBilledCents: Cents;
-};
+export type JobProgress = CostProgress & { earnedCents: Cents; overBilledCents: Cents };
 export type ProgressFacts = {
   costs: readonly JobCostRow[];
   /** The agreed price without tax. */
@@ -38,50 +28,20 @@ export type ProgressFacts = {
 };
 
 /**
- * How far a job is, what it has earned, and whether more or less than that was billed.
- *
- * Progress is cost-to-cost, the input method of ASC 606-10-55-20 (IFRS 15.B18): cost so far over expected cost. The
- * expected cost of a category is its plan, or what was spent once that is more; a closed job expects no more than it
- * cost and is complete.
+ * How far a job is, what it has earned, and whether more or less than that was billed: cost-to-cost, the input method
+ * of ASC 606-10-55-20 (IFRS 15.B18). A closed job is complete and has earned its contract, whatever it cost. Without
+ * planned cost nothing says how far an open job is: it has earned nothing yet.
  */
-export function jobProgress({ costs, contractNetCents, billedNetCents, closed }: ProgressFacts): Progress {
-  const plannedCostCents = sumCents(costs.map((row) => row.plannedCents));
-  const actualCostCents = sumCents(costs.map((row) => row.actualCents));
-  const expectedCostCents = closed ? actualCostCents : sumCents(costs.map(expectedCost));
-  const done = completion({ plannedCostCents, actualCostCents, expectedCostCents, closed });
-  const earnedCents = done === null ? 0 : roundHalfUp(done.times(contractNetCents));
+export function jobProgress({ costs, contractNetCents, billedNetCents, closed }: ProgressFacts): JobProgress {
+  const progress = costProgress(costs, closed);
+  const known = closed || progress.plannedCostCents > 0;
+  const earnedCents = closed ? contractNetCents : known ? earned(contractNetCents, progress) : 0;
   return {
-    plannedCostCents,
-    actualCostCents,
-    expectedCostCents,
-    percentComplete: done === null ? null : done.toDecimalPlaces(4, Decimal.ROUND_HALF_UP).toFixed(),
+    ...progress,
+    percentComplete: closed ? '1' : known ? progress.percentComplete : null,
     earnedCents,
-    overBilledCents: billedNetCents - earnedCents,
+    overBilledCents: overBilled(billedNetCents, earnedCents),
   };
-}
-
-/** The plan of a category, or what was spent once that is more. */
-export function expectedCost(row: JobCostRow): Cents {
-  return Math.max(row.plannedCents, row.actualCents);
-}
-
-type Costs = Pick<Progress, 'plannedCostCents' | 'actualCostCents' | 'expectedCostCents'>;
-
-/** Exact, from 0 to 1. Costs reversed below zero in one category do not take a job below its start. */
-function completion({
-  plannedCostCents,
-  actualCostCents,
-  expectedCostCents,
-  closed,
-}: Costs & { closed: boolean }): Decimal | null {
-  if (closed) return new Decimal(1);
-  if (plannedCostCents <= 0) return null;
-  return Decimal.min(1, Decimal.max(0, new Decimal(actualCostCents).div(expectedCostCents)));
-}
-
-/** The share of planned time that was used, `"1.25"` for a quarter over; null when none was planned. */
-export function hoursUsed(plannedMinutes: number, clockedMinutes: number): string | null {
-  return ratio(clockedMinutes, plannedMinutes);
 }
 
 function of(category: CostCategory) {
