@@ -30,6 +30,8 @@ function areInstalled() {
     .every(([path, entry]) => isSame(entry, present[path]));
 }
 
+/** Where a package came from is compared only when the lock says so, as it does for our own packages. */
 function isSame(wanted, present) {
-  return present !== undefined && present.version === wanted.version && present.resolved === wanted.resolved;
+  if (!present || present.version !== wanted.version) return false;
+  return wanted.resolved === undefined || present.resolved === wanted.resolved;
 }

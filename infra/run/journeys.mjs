@@ -45,9 +45,15 @@ export function environmentOf({ address, inbox, payments }) {
 function withLogs(result, crashed, apiLog) {
   if (result.failed === 0 && !crashed) return result;
   const failed = Math.max(1, result.failed);
-  return {
-    ...result,
-    failed,
-    output: `${result.output}${crashed}\nThe end of the API's log:\n${lastLines(apiLog, 15)}`,
-  };
+  const troubles = troublesIn(apiLog);
+  const told = troubles.length > 0 ? `\nWhat the API logged as trouble:\n${troubles.join('\n')}` : '';
+  return { ...result, failed, output: `${result.output}${crashed}${told}` };
+}
+
+/** The last lines that are warnings or worse: pino writes the level as a number, 40 and above. */
+function troublesIn(apiLog) {
+  return lastLines(apiLog, 5_000)
+    .split('\n')
+    .filter((line) => /"level":[456]0,/.test(line))
+    .slice(-10);
 }

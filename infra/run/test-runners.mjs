@@ -1,3 +1,4 @@
+import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { CommandFault, runCommand } from './commands.mjs';
 import { rootFolder } from './places.mjs';
@@ -57,7 +58,7 @@ export async function runJourneys({ words, resultFolder, environment }) {
   const resultFile = join(resultFolder, 'journeys.json');
   const { output, fault } = await attempt(
     node,
-    [tool('@playwright/test/cli.js'), 'test', '--reporter=line,json', ...words],
+    [tool('@playwright/test/cli.js'), 'test', `--config=${configFile()}`, '--reporter=line,json', ...words],
     {
       cwd: join(rootFolder, 'packages/web'),
       env: { ...environment, CI: 'true', PLAYWRIGHT_JSON_OUTPUT_FILE: resultFile },
@@ -71,6 +72,11 @@ export async function runJourneys({ words, resultFolder, environment }) {
     skipped: words.length > 0 ? 0 : (stats.skipped ?? 0),
   };
   return judge(counts, fault, output);
+}
+
+function configFile() {
+  const places = ['e2e/playwright.config.ts', 'playwright.config.ts'];
+  return places.find((place) => existsSync(join(rootFolder, 'packages/web', place))) ?? places[0];
 }
 
 async function attempt(command, words, options) {
