@@ -1,19 +1,25 @@
+import { priceSeedFrom } from './control/price-seed.js';
+import { needed, Reader } from './control/read.js';
 import type { PaymentsFakeOptions, PriceSeed } from './options.js';
 import type { Endpoint } from './webhooks/endpoint.js';
 
 type Environment = Record<string, string | undefined>;
 
-/** Webhook addresses are separated by commas and share one secret; without a secret nothing is sent. */
+/** Webhook addresses are separated by commas and share one secret. Errors: an address without a secret. */
 function endpointsFrom(env: Environment): Endpoint[] {
   const secret = env['PAYMENTS_FAKE_WEBHOOK_SECRET'];
   const urls = (env['PAYMENTS_FAKE_WEBHOOK_URL'] ?? '').split(',').map((url) => url.trim());
-  if (!secret) return [];
-  return urls.filter((url) => url !== '').map((url) => ({ url, secret, sends: 'all' }));
+  return urls
+    .filter((url) => url !== '')
+    .map((url) => ({ url, secret: needed(secret, 'PAYMENTS_FAKE_WEBHOOK_SECRET'), sends: 'all' }));
 }
 
+/** A JSON list of prices, as the control for one takes them. */
 function pricesFrom(env: Environment): PriceSeed[] | undefined {
   const text = env['PAYMENTS_FAKE_PRICES'];
-  return text ? (JSON.parse(text) as PriceSeed[]) : undefined;
+  return text
+    ? new Reader({ prices: JSON.parse(text) as unknown }).list('prices')?.map(priceSeedFrom)
+    : undefined;
 }
 
 /** The options that PAYMENTS_FAKE_* variables give; README.md lists them. */

@@ -7,6 +7,7 @@ import type { Provider } from '../provider.js';
 import { seedPrices } from '../seed.js';
 import { onShelf } from '../state/book.js';
 import { invalid, noSuch } from '../wire/error.js';
+import { priceSeedFrom } from './price-seed.js';
 import { needed, Reader } from './read.js';
 
 /** Prices, subscriptions, accounts and the clock. */
@@ -33,15 +34,7 @@ export function thingRoutes(provider: Provider): Router {
 }
 
 function putUpPrice(provider: Provider, body: unknown): Stripe.Price | undefined {
-  const reader = new Reader(body);
-  const seed = {
-    id: needed(reader.text('id'), 'id'),
-    productName: reader.text('productName') ?? 'Test product',
-    unitAmountCents: needed(reader.integer('unitAmountCents'), 'unitAmountCents'),
-    currency: reader.text('currency') ?? 'usd',
-    interval: reader.oneOf('interval', ['month', 'year']) ?? 'month',
-  };
-  reader.end();
+  const seed = priceSeedFrom(body);
   const { book, now } = provider.desk(null);
   seedPrices(book, [seed], now());
   provider.changed();

@@ -19,7 +19,7 @@ export function checkoutPage(view: CheckoutView): string {
   const title = session.mode === 'subscription' ? `Subscribe to ${view.seller}` : `Pay ${view.seller}`;
   const content = html`${alert(view.error)} ${summary(view.record)}
     <form method="post" action="/c/pay/${session.id}">
-      ${emailField(view)} ${cardChoice(view.card)}
+      ${emailField(view)} ${cardChoice(view.card, session.mode === 'subscription')}
       <button type="submit" name="action" value="pay">${buttonText(view.record)}</button>
     </form>
     ${backLink(session)}`;

@@ -13,7 +13,7 @@ export function page(title: string, content: Html): string {
         <link rel="stylesheet" href="/page.css" />
       </head>
       <body>
-        <p class="notice" role="note">${NOTICE}</p>
+        <header><p class="notice">${NOTICE}</p></header>
         <main>
           <h1>${title}</h1>
           ${content}

@@ -5,6 +5,6 @@ export function money(cents: number, currency: string): string {
 
 /** Unix seconds as a UTC date. */
 export function day(unixSeconds: number): string {
-  const options = { timeZone: 'UTC', year: 'numeric', month: 'long', day: 'numeric' } as const;
+  const options = { timeZone: 'UTC', year: 'numeric', month: 'short', day: 'numeric' } as const;
   return new Intl.DateTimeFormat('en-US', options).format(unixSeconds * 1000);
 }

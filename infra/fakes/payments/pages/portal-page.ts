@@ -68,7 +68,7 @@ function actions({ desk, session }: PortalView, subscription: Stripe.Subscriptio
     ? action('resume', 'Keep the subscription')
     : action('cancel', 'Cancel at the end of the period');
   return html`${owing ? form(action('pay', 'Pay the open invoice now')) : null}
-  ${form(html`${cardChoice('pays')}${action('card', 'Change the card')}`)} ${form(cancel)}
+  ${form(html`${cardChoice('pays', true)}${action('card', 'Change the card')}`)} ${form(cancel)}
   ${form(testControls())}`;
 }
 

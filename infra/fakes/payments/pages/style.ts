@@ -21,5 +21,6 @@ a { color: #14532d; }
 :focus-visible { outline: 3px solid #b45309; outline-offset: 2px; }
 .alert { padding: 0.75rem 1rem; border: 2px solid #b91c1c; color: #7f1d1d; background: #fef2f2; }
 .test { border-style: dashed; }
+@media (max-width: 30rem) { main { padding: 1rem; } table { font-size: 0.9rem; } }
 .total { font-size: 1.6rem; font-weight: 700; }
 `;
