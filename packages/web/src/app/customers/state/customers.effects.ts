@@ -1,6 +1,7 @@
 import { inject } from '@angular/core';
 import { Router } from '@angular/router';
 import { Actions, createEffect, ofType } from '@ngrx/effects';
+import type { Action } from '@ngrx/store';
 import { concatMap, exhaustMap, filter, map, switchMap, tap } from 'rxjs';
 import { catchProblem } from '../../platform/api/catch-problem';
 import { isStale } from '../../platform/api/problem-kinds';
@@ -172,7 +173,7 @@ const DONE: Record<string, string> = {
 export const say = createEffect(
   (actions$ = inject(Actions), notices = inject(Notices)) =>
     actions$.pipe(
-      map(({ type }) => DONE[type]),
+      map(({ type }: Action) => DONE[type]),
       filter((message) => message !== undefined),
       tap((message) => notices.say(message)),
     ),

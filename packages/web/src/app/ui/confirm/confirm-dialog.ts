@@ -11,7 +11,7 @@ import {
 } from '@angular/material/dialog';
 import { MatError, MatFormField, MatLabel } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
-import type { ConfirmAnswer, ConfirmQuestion } from './confirm';
+import type { ConfirmAnswer, ConfirmQuestion } from './confirm-question';
 
 @Component({
   selector: 'bm-confirm-dialog',
@@ -41,7 +41,9 @@ import type { ConfirmAnswer, ConfirmQuestion } from './confirm';
         }
       </mat-dialog-content>
       <mat-dialog-actions>
-        <button matButton type="button" mat-dialog-close>{{ question.cancel ?? 'Cancel' }}</button>
+        <button matButton type="button" [mat-dialog-close]="undefined">
+          {{ question.cancel ?? 'Cancel' }}
+        </button>
         <button matButton="filled" type="submit" [class.harm]="question.tone === 'harm'">
           {{ question.action }}
         </button>

@@ -5,7 +5,8 @@ import { MATERIAL_ANIMATIONS } from '@angular/material/core';
 import { MatButtonHarness } from '@angular/material/button/testing';
 import { MatDialogHarness } from '@angular/material/dialog/testing';
 import { MatInputHarness } from '@angular/material/input/testing';
-import { Confirm, type ConfirmAnswer, type ConfirmQuestion } from './confirm';
+import { Confirm } from './confirm';
+import type { ConfirmAnswer, ConfirmQuestion } from './confirm-question';
 
 @Component({ selector: 'bm-confirm-test', template: '', changeDetection: ChangeDetectionStrategy.OnPush })
 class Host {

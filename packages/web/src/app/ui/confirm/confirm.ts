@@ -2,19 +2,7 @@ import { inject, Injectable } from '@angular/core';
 import { MatDialog } from '@angular/material/dialog';
 import type { Observable } from 'rxjs';
 import { ConfirmDialog } from './confirm-dialog';
-
-export type ConfirmQuestion = {
-  title: string;
-  text: string;
-  /** The button that goes on, named after what it does: "Archive". */
-  action: string;
-  /** `harm` for what cannot be taken back. */
-  tone?: 'plain' | 'harm';
-  cancel?: string;
-  /** Asks why, in the person's own words. */
-  reason?: { label: string; required: boolean };
-};
-export type ConfirmAnswer = { reason: string };
+import type { ConfirmAnswer, ConfirmQuestion } from './confirm-question';
 
 /** Asks before something is done that deserves a second thought. Emits the answer, or undefined for no, then ends. */
 @Injectable({ providedIn: 'root' })

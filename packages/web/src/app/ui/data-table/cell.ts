@@ -6,8 +6,8 @@ import { Directive, inject, input, TemplateRef } from '@angular/core';
  */
 @Directive({ selector: 'ng-template[bmCell]' })
 export class Cell<Row> {
-  readonly key = input.required<string>({ alias: 'bmCell' });
-  readonly rows = input.required<readonly Row[]>({ alias: 'bmCellOf' });
+  readonly bmCell = input.required<string>();
+  readonly bmCellOf = input.required<readonly Row[]>();
   readonly template = inject<TemplateRef<{ $implicit: Row }>>(TemplateRef);
 
   static ngTemplateContextGuard<Row>(_: Cell<Row>, context: unknown): context is { $implicit: Row } {

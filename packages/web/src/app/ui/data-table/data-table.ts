@@ -30,6 +30,7 @@ import { nextSort, sortDirection } from './sort';
   templateUrl: './data-table.html',
   styleUrl: './data-table.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { '(keydown)': 'walk($event)' },
 })
 export class DataTable<Row extends { id: string }> {
   /** What is listed, for who cannot see the screen: "Customers". */
@@ -68,7 +69,7 @@ export class DataTable<Row extends { id: string }> {
   });
   protected readonly paged = computed(() => this.hasPrevious() || this.next() !== null);
   private readonly templates = computed(
-    () => new Map(this.cells().map((cell) => [cell.key(), cell.template])),
+    () => new Map(this.cells().map((cell) => [cell.bmCell(), cell.template])),
   );
 
   protected templateOf(column: Column<Row>): TemplateRef<{ $implicit: Row }> | null {
