@@ -1,8 +1,12 @@
 import type { Express } from 'express';
 import type Stripe from 'stripe';
 import { createApp } from './app.js';
+import { accountsOutbox } from './features/accounts/accounts-outbox.js';
 import { accountsRoutes } from './features/accounts/accounts-routes.js';
 import { AccountsService } from './features/accounts/accounts-service.js';
+import { passwordsRoutes } from './features/accounts/passwords-routes.js';
+import { PasswordsService } from './features/accounts/passwords-service.js';
+import { sessionsRoutes } from './features/accounts/sessions-routes.js';
 import { customersRoutes } from './features/customers/customers-routes.js';
 import { CustomersService } from './features/customers/customers-service.js';
 import { createShop } from './features/shops/shops-public.js';
@@ -11,6 +15,7 @@ import { startTrial } from './features/subscription/trial.js';
 import { notFound } from './platform/http/problem-error.js';
 import type { Access } from './platform/http/mount.js';
 import type { Route } from './platform/http/route.js';
+import { tryLimits } from './platform/http/try-limits.js';
 import { createUploadReader } from './platform/http/uploads.js';
 import { MAIL, Mailer, type DocumentMaker, type DocumentRef, type Letter } from './platform/mail/mail.js';
 import { OutboxWorker } from './platform/outbox/outbox.js';
@@ -27,16 +32,20 @@ export type Product = {
   setOpen(open: boolean): void;
   close(): Promise<void>;
 };
-export type Services = { accounts: AccountsService; customers: CustomersService };
+export type Services = {
+  accounts: AccountsService;
+  passwords: PasswordsService;
+  customers: CustomersService;
+};
 
 /** Wires everything. The only place that knows which service needs which. */
 export function compose(platform: Platform): Product {
   const services = createServices(platform);
-  const routes = createRoutes(services);
+  const routes = createRoutes(services, platform);
   const mailer = new Mailer(platform.config.mail, documentMaker({}));
   const outbox = new OutboxWorker(
     platform.dataSource,
-    outboxHandlers(mailer, {}),
+    { ...outboxHandlers(mailer, {}), ...accountsOutbox({ ...services, ...platform }) },
     platform.clock,
     platform.log,
   );
@@ -70,14 +79,24 @@ function createServices({ config }: Platform): Services {
     async createShop(scope, personId, input) {
       const shopId = await createShop(scope, personId, input);
       await startTrial(scope.forShop(shopId));
+      return shopId;
     },
     membershipsOf,
   });
-  return { accounts, customers: new CustomersService() };
+  return {
+    accounts,
+    passwords: new PasswordsService(config.origin),
+    customers: new CustomersService(),
+  };
 }
 
-function createRoutes(services: Services): Route[] {
-  return [...accountsRoutes(services.accounts), ...customersRoutes(services.customers)];
+function createRoutes(services: Services, { sessions }: Platform): Route[] {
+  return [
+    ...accountsRoutes(services.accounts),
+    ...sessionsRoutes(services.accounts, sessions),
+    ...passwordsRoutes(services.passwords),
+    ...customersRoutes(services.customers),
+  ];
 }
 
 function createAccess(platform: Platform): Access {
@@ -86,11 +105,7 @@ function createAccess(platform: Platform): Access {
     member: memberAccess,
     link: () => Promise.reject(notFound('This link')),
     sessionOf: (request) => sessionOf(request, sessions),
-    async limit(kind, request) {
-      const { email } = (request.body ?? {}) as { email?: unknown };
-      await limits.count(`${kind}-address`, request.ip ?? '');
-      if (typeof email === 'string') await limits.count(`${kind}-account`, email.trim().toLowerCase());
-    },
+    ...tryLimits(limits, (request) => request.session.personId ?? null),
   };
 }
 

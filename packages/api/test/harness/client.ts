@@ -23,6 +23,21 @@ export class Client {
     return client;
   }
 
+  /** Another browser with the same cookies, as somebody who copied them would have. */
+  copy(): Client {
+    const client = new Client(this.server, this.origin, this.prefix);
+    client.cookies = new Map(this.cookies);
+    return client;
+  }
+
+  cookie(name: string): string | undefined {
+    return this.cookies.get(name);
+  }
+
+  setCookie(name: string, value: string): void {
+    this.cookies.set(name, value);
+  }
+
   get(path: string, query: Record<string, string> = {}): Promise<Response> {
     return this.finish(request(this.server).get(this.address(path)).query(query));
   }

@@ -70,7 +70,7 @@ const GRANTS: Record<Role, (can: Grant, actor: Actor) => void> = {
 };
 
 function grantCrew(can: Grant, { memberId }: Actor): void {
-  can('read', 'Operation');
+  can('read', 'Operation', ['floor']);
   can('read', 'Job', ['floor'], { openToCrew: true });
   can('read', 'Job', ['floor'], { assignedMemberIds: memberId });
   can('read', 'JobFile');
@@ -78,7 +78,8 @@ function grantCrew(can: Grant, { memberId }: Actor): void {
 }
 
 function grantLeadHand(can: Grant): void {
-  can('read', ['Operation', 'Member', 'Customer', 'Site', 'JobFile']);
+  can('read', ['Operation', 'Member'], ['floor']);
+  can('read', ['Customer', 'Site', 'JobFile']);
   can(['read', 'update'], 'Job', ['floor']);
   can(['read', 'create', 'update', 'correct'], 'TimeEntry', ['floor']);
   can(['create', 'delete'], 'JobFile');
@@ -99,7 +100,7 @@ function grantBookkeeper(can: Grant): void {
   ]);
   can(['create', 'update'], ['Customer', 'Site']);
   can(['read', 'create', 'update', 'delete', 'send', 'issue', 'credit', 'export'], 'Invoice');
-  can(['read', 'create', 'export'], 'Payment');
+  can(['read', 'create', 'correct', 'export'], 'Payment');
   can(['read', 'export'], 'LedgerEntry');
   can(['read', 'create', 'update', 'correct', 'export'], 'TimeEntry');
   can(['create', 'delete'], ['JobCost', 'JobFile']);

@@ -47,6 +47,10 @@ export type SignIn = z.infer<typeof signInSchema>;
 export const confirmEmailSchema = z.strictObject({ token: tokenSchema });
 export type ConfirmEmail = z.infer<typeof confirmEmailSchema>;
 
+/** The letter that confirms an address, once more. Known and unknown addresses get the same answer. */
+export const resendConfirmationSchema = z.strictObject({ email: emailSchema });
+export type ResendConfirmation = z.infer<typeof resendConfirmationSchema>;
+
 export const requestPasswordResetSchema = z.strictObject({ email: emailSchema });
 export type RequestPasswordReset = z.infer<typeof requestPasswordResetSchema>;
 

@@ -52,6 +52,10 @@ export const invitationSchema = z.object({
 export type Invitation = z.infer<typeof invitationSchema>;
 export const invitationsSchema = rowsSchema(invitationSchema);
 
+/** The secret of the link, sent in a body so that it stays out of logs and histories. */
+export const openInvitationSchema = z.strictObject({ token: tokenSchema });
+export type OpenInvitation = z.infer<typeof openInvitationSchema>;
+
 /** What the link in the invitation shows before it is accepted. */
 export const invitationOfferSchema = z.object({
   shopName: z.string(),

@@ -1,14 +1,17 @@
 import {
   confirmEmailSchema,
+  membershipSchema,
+  personSchema,
+  resendConfirmationSchema,
   sessionSchema,
-  signInSchema,
   signUpSchema,
+  updatePersonSchema,
 } from '@bookmatch/common/accounts/accounts-contract';
-import { ProblemError } from '../../platform/http/problem-error.js';
+import { createShopSchema } from '@bookmatch/common/shops/shops-contract';
 import { accountRoute, type Route } from '../../platform/http/route.js';
 import type { AccountsService } from './accounts-service.js';
-import { verifyCredentials } from './sign-in.js';
 
+/** Becoming somebody, and being somebody. */
 export function accountsRoutes(service: AccountsService): Route[] {
   return [
     accountRoute({
@@ -21,7 +24,19 @@ export function accountsRoutes(service: AccountsService): Route[] {
       repeat: 'natural',
       body: signUpSchema,
       status: 202,
-      handle: ({ scope, body }) => service.signUp(scope, body),
+      handle: ({ scope, body }) => service.requestSignUp(scope, body),
+    }),
+    accountRoute({
+      method: 'post',
+      path: '/resend-confirmation',
+      summary: 'Send the letter that confirms an address once more',
+      allow: 'anyone',
+      limit: 'mailing',
+      // Each asks for a letter; the limit holds them back.
+      repeat: 'natural',
+      body: resendConfirmationSchema,
+      status: 202,
+      handle: ({ scope, body }) => service.requestConfirmation(scope, body.email),
     }),
     accountRoute({
       method: 'post',
@@ -41,47 +56,31 @@ export function accountsRoutes(service: AccountsService): Route[] {
       },
     }),
     accountRoute({
-      method: 'post',
-      path: '/sign-in',
-      summary: 'Sign in',
-      allow: 'anyone',
-      limit: 'guessing',
-      // Each time starts a session of its own.
-      repeat: 'natural',
-      transaction: 'own',
-      body: signInSchema,
-      answer: sessionSchema,
-      async handle({ work, stamp, body, session }) {
-        const person = await work.read(stamp, (scope) => verifyCredentials(scope, body.email, body.password));
-        if (!person)
-          throw new ProblemError('wrong-credentials', 'The e-mail address or the password is wrong.');
-        if (!person.emailConfirmedAt)
-          throw new ProblemError(
-            'conflict',
-            'Confirm your e-mail address first. The link is in the letter we sent you.',
-          );
-        await session.signIn(person.id);
-        return work.read(stamp, (scope) => service.session(scope, person.id));
-      },
-    }),
-    accountRoute({
-      method: 'post',
-      path: '/sign-out',
-      summary: 'Sign out here',
-      allow: 'anyone',
-      // Signed out is signed out.
-      repeat: 'natural',
-      transaction: 'own',
-      status: 204,
-      handle: ({ session }) => session.signOut(),
-    }),
-    accountRoute({
       method: 'get',
       path: '/session',
       summary: 'Who is signed in, and their shops',
       allow: 'signed-in',
       answer: sessionSchema,
       handle: ({ scope, personId }) => service.session(scope, personId ?? ''),
+    }),
+    accountRoute({
+      method: 'patch',
+      path: '/person',
+      summary: 'Change the own name',
+      allow: 'signed-in',
+      body: updatePersonSchema,
+      answer: personSchema,
+      handle: ({ scope, personId, body }) => service.rename(scope, personId ?? '', body.name),
+    }),
+    accountRoute({
+      method: 'post',
+      path: '/shops',
+      summary: 'Open one more shop',
+      allow: 'signed-in',
+      body: createShopSchema,
+      answer: membershipSchema,
+      status: 201,
+      handle: ({ scope, personId, body }) => service.addShop(scope, personId ?? '', body),
     }),
   ];
 }

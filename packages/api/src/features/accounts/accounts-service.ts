@@ -1,21 +1,29 @@
-import type { Session, SignUp } from '@bookmatch/common/accounts/accounts-contract';
+import type {
+  Membership,
+  Person as PersonView,
+  Session,
+  SignUp,
+} from '@bookmatch/common/accounts/accounts-contract';
+import type { CreateShop } from '@bookmatch/common/shops/shops-contract';
 import type { GlobalScope } from '../../platform/database/scope.js';
-import { hashToken, newToken } from '../../platform/http/secrets.js';
-import { ProblemError } from '../../platform/http/problem-error.js';
 import { sendMail } from '../../platform/mail/mail.js';
+import { enqueue } from '../../platform/outbox/outbox.js';
+import { confirmationLetter, knownAddressLetter } from './account-letters.js';
 import { hashPassword } from './passwords.js';
-import { PersonToken } from './person-token.entity.js';
+import { issueToken, redeemToken } from './person-tokens.js';
 import { Person } from './person.entity.js';
-
-const HOUR_MS = 3_600_000;
-const CONFIRM_MS = 48 * HOUR_MS;
 
 /** What `accounts` asks of the slices above it, given by `compose.ts`. */
 export type AccountHooks = {
-  /** Makes the shop with its first member. */
-  createShop(scope: GlobalScope, personId: string, input: SignUp): Promise<void>;
-  membershipsOf(scope: GlobalScope, personId: string): Promise<Session['memberships']>;
+  /** Makes the shop with its first member, and answers its id. */
+  createShop(scope: GlobalScope, personId: string, input: CreateShop): Promise<string>;
+  membershipsOf(scope: GlobalScope, personId: string): Promise<Membership[]>;
 };
+
+/** A sign-up as the outbox holds it: the password is hashed before it is written anywhere. */
+export type SignUpRequest = Omit<SignUp, 'password'> & { personId: string; passwordHash: string };
+export const SIGN_UP = 'account-sign-up';
+export const RESEND_CONFIRMATION = 'account-resend-confirmation';
 
 /** People: signing up, confirming an address, who is signed in. */
 export class AccountsService {
@@ -25,91 +33,73 @@ export class AccountsService {
   ) {}
 
   /**
-   * Makes the person, the shop and the trial. An address that is known already gets a letter saying so instead; the
-   * answer is the same, so that nobody learns who has an account.
+   * Takes a sign-up in. The outbox carries it out, so that a known and an unknown address get the same answer after the
+   * same work: nobody learns who has an account.
    */
-  async signUp(scope: GlobalScope, input: SignUp): Promise<void> {
-    const passwordHash = await hashPassword(input.password);
-    const { name, email } = input;
+  async requestSignUp(scope: GlobalScope, { password, ...input }: SignUp): Promise<void> {
+    const passwordHash = await hashPassword(password);
+    await enqueue(scope, SIGN_UP, { ...input, personId: scope.newId(), passwordHash });
+  }
+
+  /**
+   * Makes the person, the shop and the trial, and sends the letter that confirms the address. An address that is known
+   * already gets a letter saying so instead. A repeat does nothing.
+   */
+  async signUp(scope: GlobalScope, request: SignUpRequest): Promise<void> {
+    const { personId, name, email, passwordHash, shopName, timeZone, unitSystem } = request;
     const known = await scope.global(Person).findOneBy({ email }, true);
     if (known) {
-      await this.sendKnownAddress(scope, known);
+      if (known.id !== personId) await sendMail(scope, knownAddressLetter(known, this.origin));
       return;
     }
-    const person = await scope
-      .global(Person)
-      .insert({ id: scope.newId(), name, email, passwordHash, emailConfirmedAt: null });
-    await this.hooks.createShop(scope, person.id, input);
+    const values = { id: personId, name, email, passwordHash, emailConfirmedAt: null };
+    const person = await scope.global(Person).insert(values);
+    await this.hooks.createShop(scope, personId, { shopName, timeZone, unitSystem });
     await this.sendConfirmation(scope, person);
+  }
+
+  /** Leaves the look-up to the outbox, for the reason given at `requestSignUp`. */
+  async requestConfirmation(scope: GlobalScope, email: string): Promise<void> {
+    await enqueue(scope, RESEND_CONFIRMATION, { email });
+  }
+
+  /** Sends the confirmation once more, to somebody who signed up and has not confirmed yet. */
+  async resendConfirmation(scope: GlobalScope, email: string): Promise<void> {
+    const person = await scope.global(Person).findOneBy({ email });
+    if (person && !person.emailConfirmedAt) await this.sendConfirmation(scope, person);
   }
 
   /** Confirms the address that the token was sent to. @throws link-expired */
   async confirmEmail(scope: GlobalScope, token: string): Promise<Person> {
-    const person = await this.redeem(scope, token, 'confirm-email');
+    const person = await redeemToken(scope, token, 'confirm-email');
     return scope.global(Person).update(person, { emailConfirmedAt: person.emailConfirmedAt ?? scope.now });
   }
 
   async session(scope: GlobalScope, personId: string): Promise<Session> {
     const person = await scope.global(Person).get(personId);
-    const { id, name, email, emailConfirmedAt } = person;
-    return {
-      person: { id, name, email, emailConfirmed: emailConfirmedAt !== null },
-      memberships: await this.hooks.membershipsOf(scope, personId),
-    };
+    return { person: viewPerson(person), memberships: await this.hooks.membershipsOf(scope, personId) };
   }
 
-  async sendConfirmation(scope: GlobalScope, person: Person): Promise<void> {
-    const token = await this.issueToken(scope, person, 'confirm-email', CONFIRM_MS);
-    await sendMail(scope, {
-      to: person.email,
-      fromName: 'Bookmatch',
-      subject: 'Confirm your e-mail address',
-      content: {
-        heading: `Welcome, ${person.name}`,
-        paragraphs: ['Confirm your e-mail address to open your shop. The link works for two days, once.'],
-        action: { label: 'Confirm and open my shop', url: `${this.origin}/confirm-email?token=${token}` },
-        footer: 'You get this because somebody signed up with this address. If it was not you, do nothing.',
-      },
-    });
+  async rename(scope: GlobalScope, personId: string, name: string): Promise<PersonView> {
+    const people = scope.global(Person);
+    return viewPerson(await people.update(await people.get(personId, true), { name }));
   }
 
-  private async sendKnownAddress(scope: GlobalScope, person: Person): Promise<void> {
-    await sendMail(scope, {
-      to: person.email,
-      fromName: 'Bookmatch',
-      subject: 'You have an account already',
-      content: {
-        heading: `Hello ${person.name}`,
-        paragraphs: [
-          'Somebody signed up with this address, which has an account already. Nothing was changed.',
-          'Sign in to open your shop, or to add another one.',
-        ],
-        action: { label: 'Sign in', url: `${this.origin}/sign-in` },
-        footer: 'If it was not you, do nothing.',
-      },
-    });
+  /** One more shop for somebody who is signed in, with a trial of its own. */
+  async addShop(scope: GlobalScope, personId: string, input: CreateShop): Promise<Membership> {
+    const shopId = await this.hooks.createShop(scope, personId, input);
+    const memberships = await this.hooks.membershipsOf(scope, personId);
+    const membership = memberships.find((one) => one.shopId === shopId);
+    if (!membership) throw new TypeError('The new shop has no owner.');
+    return membership;
   }
 
-  private async issueToken(
-    scope: GlobalScope,
-    person: Person,
-    purpose: string,
-    lifeMs: number,
-  ): Promise<string> {
-    const { token, tokenHash } = newToken();
-    const expiresAt = new Date(scope.now.getTime() + lifeMs);
-    await scope
-      .global(PersonToken)
-      .insert({ id: scope.newId(), personId: person.id, purpose, tokenHash, expiresAt, usedAt: null });
-    return token;
+  private async sendConfirmation(scope: GlobalScope, person: Person): Promise<void> {
+    const token = await issueToken(scope, person.id, 'confirm-email');
+    await sendMail(scope, confirmationLetter(person, this.origin, token));
   }
+}
 
-  private async redeem(scope: GlobalScope, token: string, purpose: string): Promise<Person> {
-    const tokens = scope.global(PersonToken);
-    const found = await tokens.findOneBy({ tokenHash: hashToken(token), purpose }, true);
-    if (!found || found.usedAt || found.expiresAt <= scope.now)
-      throw new ProblemError('link-expired', 'This link was used already or is too old. Ask for a new one.');
-    await tokens.update(found, { usedAt: scope.now });
-    return scope.global(Person).get(found.personId);
-  }
+function viewPerson({ id, name, email, emailConfirmedAt }: Person): PersonView {
+  return { id, name, email, emailConfirmed: emailConfirmedAt !== null };
 }

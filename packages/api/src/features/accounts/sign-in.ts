@@ -1,4 +1,4 @@
-import passport from 'passport';
+import type passport from 'passport';
 import { Strategy } from 'passport-local';
 import type { GlobalScope } from '../../platform/database/scope.js';
 import { Person } from './person.entity.js';

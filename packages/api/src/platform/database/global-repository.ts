@@ -15,6 +15,8 @@ export class GlobalRepository<Row extends GlobalRow> {
     private readonly manager: EntityManager,
     private readonly entity: new () => Row,
     private readonly stamp: Stamp,
+    /** The shop whose audit trail a change belongs in, when one is acting. */
+    private readonly auditShopId: string | null = null,
   ) {}
 
   findBy(where: Where<Row>, orderBy?: keyof Row & string, lock = false): Promise<Row[]> {
@@ -59,7 +61,7 @@ export class GlobalRepository<Row extends GlobalRow> {
     return recordChange(
       this.manager,
       this.manager.connection.getMetadata(this.entity),
-      null,
+      this.auditShopId,
       this.stamp,
       change,
     );

@@ -62,6 +62,10 @@ export class ShopScope extends GlobalScope {
     super(manager, stamp);
   }
 
+  override global<Row extends GlobalRow>(entity: new () => Row): GlobalRepository<Row> {
+    return new GlobalRepository(this.manager, entity, this.stamp, this.shopId);
+  }
+
   rows<Row extends ShopRow>(entity: new () => Row): ShopRepository<Row> {
     return new ShopRepository(this.manager, entity, this.shopId, this.stamp);
   }

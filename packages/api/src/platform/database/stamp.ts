@@ -9,3 +9,10 @@ export type Author =
 
 /** What every change is stamped with. */
 export type Stamp = { author: Author; requestId: string; now: Date };
+
+/** For work nobody asked for just now: outbox messages and webhooks. `cause` is the message or event that set it off. */
+export const systemStamp = (cause: string, now: Date): Stamp => ({
+  author: { kind: 'system' },
+  requestId: cause,
+  now,
+});

@@ -30,8 +30,12 @@ export type Access = {
   /** What a customer's link opens, or a refusal thrown. */
   link(scope: GlobalScope, token: string): Promise<ResolvedLink>;
   sessionOf(request: Request): { personId: string | null; control: SessionControl };
-  limit(kind: 'guessing' | 'mailing', request: Request): Promise<void>;
+  /** Counts one try. @throws too-many-requests */
+  limit(kind: LimitKind, request: Request): Promise<void>;
+  /** Takes the tries back after a success. */
+  forgive(kind: LimitKind, request: Request): Promise<void>;
 };
+export type LimitKind = 'guessing' | 'mailing';
 export type MountOptions = { access: Access; work: UnitOfWork; uploads: UploadReader; clock: () => Date };
 
 /** Registers the routes: session → shop and ability → permission → schemas → unit of work → handler → answer schema. */
@@ -47,6 +51,7 @@ function handler(route: Route, options: MountOptions): RequestHandler {
     const entered = await enter(route as never, request, options);
     const input = await readInput(route, request, options, entered);
     const answered = await perform(route, input, options, entered);
+    if (route.kind === 'account' && route.limit) await options.access.forgive(route.limit, request);
     sendAnswer(response, answered);
   };
 }

@@ -14,11 +14,13 @@ export class RateLimitCounter {
 
 type Limit = { points: number; seconds: number };
 /**
- * Nobody is ever locked out for good, and one person's mistakes do not lock out the whole office behind one address:
- * the limit by account is low, the limit by address is ten times that.
+ * Nobody is ever locked out for good. One person's mistakes do not lock out the whole office behind one address, nor does
+ * a stranger who guesses elsewhere lock the owner of an account out: the limit on one account from one address is low,
+ * those on an account from anywhere and on an address for all accounts are ten times that.
  */
 const LIMITS = {
-  'guessing-account': { points: 10, seconds: 15 * 60 },
+  'guessing-pair': { points: 10, seconds: 15 * 60 },
+  'guessing-account': { points: 100, seconds: 15 * 60 },
   'guessing-address': { points: 100, seconds: 15 * 60 },
   'mailing-account': { points: 5, seconds: 60 * 60 },
   'mailing-address': { points: 30, seconds: 60 * 60 },

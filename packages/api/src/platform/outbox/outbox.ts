@@ -7,8 +7,15 @@ import { OutboxMessage } from './outbox-message.entity.js';
 
 export type OutboxHandler = (payload: never, message: { id: string; shopId: string | null }) => Promise<void>;
 
-/** Leaves a message to be carried out after the commit. The handler may run more than once for it. */
-export async function enqueue(scope: GlobalScope, kind: string, payload: unknown): Promise<void> {
+/**
+ * Leaves a message to be carried out after the commit, or not before `dueAt`. The handler may run more than once for it.
+ */
+export async function enqueue(
+  scope: GlobalScope,
+  kind: string,
+  payload: unknown,
+  dueAt = scope.now,
+): Promise<void> {
   const message: Omit<OutboxMessage, never> = {
     id: scope.newId(),
     createdAt: scope.now,
@@ -16,7 +23,7 @@ export async function enqueue(scope: GlobalScope, kind: string, payload: unknown
     kind,
     payload,
     attempts: 0,
-    dueAt: scope.now,
+    dueAt,
     finishedAt: null,
     givenUpAt: null,
     lastError: null,
@@ -112,12 +119,9 @@ export class OutboxWorker {
       const handler = this.handlers[message.kind];
       if (!handler) throw new TypeError(`Nothing carries out outbox messages of kind ${message.kind}.`);
       await handler(message.payload as never, message);
-      await updateRow(
-        manager,
-        OutboxMessage,
-        { id: message.id },
-        { finishedAt: this.clock(), lastError: null },
-      );
+      // A letter may hold the secret of a link, which is kept nowhere else but hashed: what was sent is not kept.
+      const done = { finishedAt: this.clock(), lastError: null, payload: {} };
+      await updateRow(manager, OutboxMessage, { id: message.id }, done);
     } catch (error) {
       this.log.warn(
         { err: error, outboxMessage: message.id, kind: message.kind },

@@ -22,7 +22,7 @@ type Options = { payments: Payments; secret: string; work: UnitOfWork; clock: ()
 export function paymentsWebhook({ payments, secret, work, clock }: Options): RequestHandler {
   return async (request, response) => {
     const signature = request.get('stripe-signature') ?? '';
-    const event = readEvent(payments, request.body as Buffer, signature, secret, clock());
+    const event = readEvent(payments, request.body as Buffer, signature, secret);
     await work
       .transaction(
         { author: { kind: 'system' }, requestId: String(request.id), now: clock() },
@@ -40,24 +40,15 @@ export function paymentsWebhook({ payments, secret, work, clock }: Options): Req
   };
 }
 
-function readEvent(
-  payments: Payments,
-  body: Buffer,
-  signature: string,
-  secret: string,
-  now: Date,
-): Stripe.Event {
+/**
+ * Measures the stamp by the machine's own clock, not by the one the product was given: it says when the bytes crossed the
+ * wire, and a demo or a test that lives in another year still talks to a provider of today.
+ */
+function readEvent(payments: Payments, body: Buffer, signature: string, secret: string): Stripe.Event {
   const stamp = Number(/(?:^|,)t=(\d{1,12})(?:,|$)/.exec(signature)?.[1] ?? 0);
-  if (!Buffer.isBuffer(body) || Math.abs(now.getTime() / 1000 - stamp) > TOLERANCE_SECONDS) throw forged();
+  if (!Buffer.isBuffer(body) || Math.abs(Date.now() / 1000 - stamp) > TOLERANCE_SECONDS) throw forged();
   try {
-    return payments.webhooks.constructEvent(
-      body,
-      signature,
-      secret,
-      TOLERANCE_SECONDS,
-      undefined,
-      now.getTime() / 1000,
-    );
+    return payments.webhooks.constructEvent(body, signature, secret, TOLERANCE_SECONDS);
   } catch {
     throw forged();
   }

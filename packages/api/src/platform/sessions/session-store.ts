@@ -44,10 +44,9 @@ export class SessionStore extends SequelizeStore {
   }
 
   override get = (sid: string, done: (error: unknown, session?: SessionData | null) => void): void => {
-    const now = this.clock();
     this.sequelize
       .query<Row>('select data from session where sid = ? and expires > ? and created_at > ?', {
-        replacements: [hashed(sid), now, new Date(now.getTime() - LONGEST_MS)],
+        replacements: [hashedSid(sid), ...this.alive()],
         type: QueryTypes.SELECT,
       })
       .then(([row]) => done(null, row ? (JSON.parse(row.data) as SessionData) : null))
@@ -56,7 +55,7 @@ export class SessionStore extends SequelizeStore {
 
   /** Updates only. A session begins with `begin`, never here. */
   override set = (sid: string, data: SessionData, done: Done = () => undefined): void => {
-    this.run('update session set data = ? where sid = ?', [JSON.stringify(data), hashed(sid)], done);
+    this.run('update session set data = ? where sid = ?', [JSON.stringify(data), hashedSid(sid)], done);
   };
 
   override touch = (sid: string, data: SessionData, done: Done = () => undefined): void => {
@@ -66,26 +65,28 @@ export class SessionStore extends SequelizeStore {
       return;
     }
     const kept = JSON.stringify({ ...data, seenAt: now.getTime() });
-    const values = [kept, now, new Date(now.getTime() + IDLE_MS), hashed(sid)];
+    const values = [kept, now, new Date(now.getTime() + IDLE_MS), hashedSid(sid)];
     this.run('update session set data = ?, last_seen_at = ?, expires = ? where sid = ?', values, done);
   };
 
   override destroy = (sid: string, done: Done = () => undefined): void => {
-    this.run('delete from session where sid = ?', [hashed(sid)], done);
+    this.run('delete from session where sid = ?', [hashedSid(sid)], done);
   };
 
   /** Writes the row of a browser that has just signed in. */
   async begin(sid: string, data: SessionData, visitor: Visitor): Promise<void> {
     const now = this.clock();
+    // Set on the session itself: the request saves it once more when it ends.
+    data.seenAt = now.getTime();
     await this.sequelize.query(
       `insert into session (sid, public_id, person_id, data, expires, created_at, last_seen_at, user_agent, address)
        values (?, ?, ?, ?, ?, ?, ?, ?, ?)`,
       {
         replacements: [
-          hashed(sid),
+          hashedSid(sid),
           v7(now),
           visitor.personId,
-          JSON.stringify({ ...data, seenAt: now.getTime() }),
+          JSON.stringify(data),
           new Date(now.getTime() + IDLE_MS),
           now,
           now,
@@ -100,32 +101,29 @@ export class SessionStore extends SequelizeStore {
   async listOf(personId: string): Promise<SessionListing[]> {
     return this.sequelize.query<SessionListing>(
       `select public_id as id, sid, user_agent as userAgent, address, created_at as createdAt, last_seen_at as lastSeenAt
-       from session where person_id = ? and expires > ? order by last_seen_at desc`,
-      { replacements: [personId, this.clock()], type: QueryTypes.SELECT },
+       from session where person_id = ? and expires > ? and created_at > ? order by last_seen_at desc, id desc`,
+      { replacements: [personId, ...this.alive()], type: QueryTypes.SELECT },
     );
   }
 
   /** Ends one of a person's sessions. Answers false when it is not theirs or is over already. */
   async endOne(personId: string, publicId: string): Promise<boolean> {
-    const [, affected] = (await this.sequelize.query(
-      'delete from session where person_id = ? and public_id = ?',
-      {
-        replacements: [personId, publicId],
-        type: QueryTypes.BULKDELETE,
-      },
-    )) as unknown as [unknown, number];
-    return affected !== 0;
-  }
-
-  /** Ends all sessions of a person at once: password change, "sign out everywhere". */
-  async endAllOf(personId: string, exceptSid?: string): Promise<void> {
-    await this.sequelize.query('delete from session where person_id = ? and sid <> ?', {
-      replacements: [personId, exceptSid === undefined ? '' : hashed(exceptSid)],
+    const ended = await this.sequelize.query('delete from session where person_id = ? and public_id = ?', {
+      replacements: [personId, publicId],
+      type: QueryTypes.BULKDELETE,
     });
+    return ended > 0;
   }
 
+  /** Whether a stored row is the one of this session id. */
   isSame(sid: string, storedSid: string): boolean {
-    return hashed(sid) === storedSid;
+    return hashedSid(sid) === storedSid;
+  }
+
+  /** What a live row's `expires` and `created_at` lie after. */
+  private alive(): [expiresAfter: Date, createdAfter: Date] {
+    const now = this.clock();
+    return [now, new Date(now.getTime() - LONGEST_MS)];
   }
 
   private run(sql: string, replacements: unknown[], done: Done): void {
@@ -133,7 +131,8 @@ export class SessionStore extends SequelizeStore {
   }
 }
 
-function hashed(sid: string): string {
+/** How a session id stands in the table: a copy of the table signs nobody in. */
+export function hashedSid(sid: string): string {
   return createHash('sha256').update(sid).digest('hex');
 }
 
