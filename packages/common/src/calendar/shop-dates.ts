@@ -38,7 +38,7 @@ export function daysOfWeek(startsOn: DateText): DateText[] {
   return [0, 1, 2, 3, 4, 5, 6].map((days) => addDays(startsOn, days));
 }
 
-function at(instant: InstantText | DateText, zone: string): DateTime<true> {
+function at(instant: string, zone: string): DateTime<true> {
   const moment = DateTime.fromISO(instant, { zone });
   if (!moment.isValid) throw new RangeError(`not an instant in a known zone: ${instant}, ${zone}`);
   return moment;
