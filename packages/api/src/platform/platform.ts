@@ -33,7 +33,7 @@ export async function openPlatform(
   const dataSource = createDataSource(config.database, entities);
   await dataSource.initialize();
   const sessionDatabase = createSessionDatabase(config.database);
-  const sessions = new SessionStore(sessionDatabase, clock);
+  const sessions = new SessionStore(sessionDatabase, (sql, values) => dataSource.query(sql, values), clock);
   return {
     config,
     log: createLogger(config.logLevel),

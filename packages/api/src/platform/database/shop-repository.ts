@@ -78,7 +78,7 @@ export class ShopRepository<Row extends ShopRow> {
     const bookkeeping = editable ? { version: row.version + 1, updatedAt: this.stamp.now } : {};
     const keys = editable ? { ...this.keys(row), version: row.version } : this.keys(row);
     const changed = await updateRow(this.manager, this.entity, keys, { ...after, ...bookkeeping });
-    if (changed !== 1) throw stale(row);
+    if (changed !== 1) throw staleVersion(row);
     await this.record({ action: 'update', rowId: row.id, before, after });
     return Object.assign(Object.create(Object.getPrototypeOf(row) as object) as Row, row, after, bookkeeping);
   }
@@ -111,7 +111,7 @@ export class ShopRepository<Row extends ShopRow> {
   }
 
   private requireVersion(row: Row, expected: number | undefined): void {
-    if (expected !== undefined && this.isEditable(row) && row.version !== expected) throw stale(row);
+    if (expected !== undefined && this.isEditable(row) && row.version !== expected) throw staleVersion(row);
   }
 
   private isEditable(row: Row): row is Row & EditableRow {
@@ -131,7 +131,8 @@ export class ShopRepository<Row extends ShopRow> {
   }
 }
 
-function stale(row: object): ProblemError {
+/** Somebody changed the row since the version that was seen. */
+export function staleVersion(row: object): ProblemError {
   const { version } = row as { version?: number };
   return new ProblemError(
     'stale-version',

@@ -18,7 +18,7 @@ export function csrf(options: { origin: string; secret: string; secure: boolean 
   };
   return (request, response, next) => {
     const cookie = cookieOf(request.headers.cookie, CSRF_COOKIE);
-    if (cookie === undefined || !isOurs(cookie)) {
+    if (cookie === undefined || (UNSAFE.has(request.method) && !isOurs(cookie))) {
       const value = randomBytes(18).toString('base64url');
       response.cookie(CSRF_COOKIE, `${value}.${sign(value)}`, {
         sameSite: 'lax',

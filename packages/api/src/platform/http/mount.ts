@@ -27,8 +27,8 @@ export type Access = {
     scope: ShopScope,
     personId: string,
   ): Promise<{ memberId: string; role: Role; readOnly: boolean } | null>;
-  /** What a customer's link opens, or a refusal thrown. */
-  link(scope: GlobalScope, token: string): Promise<ResolvedLink>;
+  /** What a customer's link opens, or a refusal thrown. Tries are counted by the network address. */
+  link(scope: GlobalScope, token: string, address: string): Promise<ResolvedLink>;
   sessionOf(request: Request): { personId: string | null; control: SessionControl };
   /** Counts one try. @throws too-many-requests */
   limit(kind: LimitKind, request: Request): Promise<void>;
@@ -115,7 +115,7 @@ async function enterLink(
 ): Promise<Entered> {
   const token = String(request.params['token']);
   const link = await options.work.read(arrival(request, options), (scope) =>
-    options.access.link(scope, token),
+    options.access.link(scope, token, request.ip ?? ''),
   );
   if (route.allow !== 'any-link' && route.allow !== `${link.subject}-link`) throw notFound();
   return {
@@ -155,7 +155,7 @@ async function readInput(
     work: options.work,
     address: request.ip ?? '',
     userAgent: (request.get('user-agent') ?? '').slice(0, 300),
-    requestHash: hashRequest(route.method, request.originalUrl, request.body),
+    requestHash: needsKey(route) ? hashRequest(route.method, request.originalUrl, request.body) : '',
   };
 }
 
