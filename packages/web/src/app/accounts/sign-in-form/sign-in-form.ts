@@ -1,15 +1,14 @@
-import { ChangeDetectionStrategy, Component, inject, input, output, signal } from '@angular/core';
-import { FormBuilder, ReactiveFormsModule } from '@angular/forms';
+import { ChangeDetectionStrategy, Component, inject, input, output } from '@angular/core';
+import { NonNullableFormBuilder, ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatError, MatFormField, MatLabel } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
-import { signInSchema } from '@bookmatch/common/accounts/accounts-contract';
-import type { Problem } from '@bookmatch/common/problems/problem';
-import { toProblem } from '../../platform/api/api-problem';
+import { signInSchema, type Session } from '@bookmatch/common/accounts/accounts-contract';
+import { Submission } from '../../platform/forms/submission';
 import { checkForm } from '../../ui/form-errors/check-form';
 import { ErrorOf } from '../../ui/form-errors/error-of';
 import { focusFirstInvalid, FormErrors } from '../../ui/form-errors/form-errors';
-import { AccountsApi } from '../accounts-api';
+import { AccountsApiClient } from '../accounts-api';
 
 /** E-mail and password; used by the page of its own and in place when a session ended. */
 @Component({
@@ -22,28 +21,17 @@ import { AccountsApi } from '../accounts-api';
 export class SignInForm {
   /** Known already when the person signs in again. */
   readonly email = input('');
-  readonly done = output();
+  readonly done = output<Session>();
 
-  private readonly accounts = inject(AccountsApi);
-  protected readonly form = inject(FormBuilder).nonNullable.group({ email: '', password: '' });
-  protected readonly problem = signal<Problem | null>(null);
-  protected readonly busy = signal(false);
+  private readonly accounts = inject(AccountsApiClient);
+  protected readonly form = inject(NonNullableFormBuilder).group({ email: '', password: '' });
+  protected readonly submission = new Submission();
 
   protected submit(element: HTMLFormElement): void {
     if (this.email()) this.form.patchValue({ email: this.email() });
     const credentials = checkForm(this.form, signInSchema);
-    if (!credentials) {
-      focusFirstInvalid(element);
-      return;
-    }
-    this.busy.set(true);
-    this.problem.set(null);
-    this.accounts.signIn(credentials).subscribe({
-      next: () => this.done.emit(),
-      error: (error: unknown) => {
-        this.busy.set(false);
-        this.problem.set(toProblem(error));
-      },
-    });
+    if (credentials)
+      this.submission.run(this.accounts.signIn(credentials), (session) => this.done.emit(session));
+    else focusFirstInvalid(element);
   }
 }

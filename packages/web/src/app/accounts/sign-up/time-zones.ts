@@ -1,0 +1,21 @@
+/** Where most shops are, under the names people use for their time. */
+export const HOME_ZONES: readonly { zone: string; name: string }[] = [
+  { zone: 'America/New_York', name: 'Eastern' },
+  { zone: 'America/Chicago', name: 'Central' },
+  { zone: 'America/Denver', name: 'Mountain' },
+  { zone: 'America/Phoenix', name: 'Mountain, without daylight saving (Arizona)' },
+  { zone: 'America/Los_Angeles', name: 'Pacific' },
+  { zone: 'America/Anchorage', name: 'Alaska' },
+  { zone: 'Pacific/Honolulu', name: 'Hawaii' },
+];
+
+/** All the others that this browser knows. */
+export function otherZones(): string[] {
+  const home = new Set(HOME_ZONES.map(({ zone }) => zone));
+  return Intl.supportedValuesOf('timeZone').filter((zone) => !home.has(zone));
+}
+
+/** The zone this browser is in. */
+export function browserZone(): string {
+  return new Intl.DateTimeFormat().resolvedOptions().timeZone;
+}
