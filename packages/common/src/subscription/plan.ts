@@ -2,7 +2,7 @@
 export const PLAN = {
   name: 'Bookmatch',
   /** A month, for each active member. */
-  pricePerMemberCents: 1_900,
+  pricePerMemberCents: 2_900,
   currency: 'USD',
   trialDays: 14,
   /** How long a shop keeps full access while a payment is past due. */
