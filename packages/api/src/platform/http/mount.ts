@@ -1,6 +1,6 @@
 import { defineAbility } from '@bookmatch/common/access/ability';
 import type { Role } from '@bookmatch/common/access/roles';
-import type { Express, Request, RequestHandler } from 'express';
+import { Router, type Express, type Request, type RequestHandler } from 'express';
 import type * as z from 'zod';
 import type { GlobalScope, ShopScope } from '../database/scope.js';
 import type { Author, Stamp } from '../database/stamp.js';
@@ -38,11 +38,20 @@ export type Access = {
 export type LimitKind = 'guessing' | 'mailing';
 export type MountOptions = { access: Access; work: UnitOfWork; uploads: UploadReader; clock: () => Date };
 
-/** Registers the routes: session → shop and ability → permission → schemas → unit of work → handler → answer schema. */
+/**
+ * Registers the routes: session → shop and ability → permission → schemas → unit of work → handler → answer schema.
+ * Each first word of a path gets a router of its own, since Express tries a router's routes one by one.
+ */
 export function mountRoutes(app: Express, routes: readonly Route[], options: MountOptions): void {
+  const routers = new Map<string, Router>();
   for (const route of routes) {
-    app[route.method](PREFIXES[route.kind] + route.path, handler(route, options));
+    const [, word = '', rest = ''] = /^(\/[^/]+)(.*)$/.exec(route.path) ?? [];
+    const start = PREFIXES[route.kind] + word;
+    const router = routers.get(start) ?? Router({ mergeParams: true });
+    routers.set(start, router);
+    router[route.method](rest || '/', handler(route, options));
   }
+  for (const [start, router] of routers) app.use(start, router);
 }
 
 function handler(route: Route, options: MountOptions): RequestHandler {
