@@ -42,7 +42,12 @@ export type UpdateEstimate = z.infer<typeof updateEstimateSchema>;
 /** A copy of the current revision as a new draft. The sent one stands until the new one is sent. */
 export const createRevisionSchema = z.strictObject({});
 
-export const sendEstimateSchema = z.strictObject({ to: emailSchema, message: notesSchema(2000) });
+export const sendEstimateSchema = z.strictObject({
+  to: emailSchema,
+  message: notesSchema(2000),
+  /** The version of the current revision: the editor saves by itself, and what is sent is what was seen. */
+  revisionVersion: versionSchema,
+});
 export type SendEstimate = z.infer<typeof sendEstimateSchema>;
 
 /** The shop records that the customer said no. */
