@@ -24,7 +24,7 @@ const MATRIX: Record<Subject, Record<Exclude<Role, 'owner'>, Action[]>> = {
   JobFile: {
     bookkeeper: ['read', 'create', 'delete'],
     'lead-hand': ['read', 'create', 'delete'],
-    crew: ['read'],
+    crew: ['read', 'create'],
   },
   TimeEntry: {
     bookkeeper: ['read', 'create', 'update', 'correct', 'export'],

@@ -73,7 +73,7 @@ function grantCrew(can: Grant, { memberId }: Actor): void {
   can('read', 'Operation', ['floor']);
   can('read', 'Job', ['floor'], { openToCrew: true });
   can('read', 'Job', ['floor'], { assignedMemberIds: memberId });
-  can('read', 'JobFile');
+  can(['read', 'create'], 'JobFile');
   can(['read', 'create', 'update'], 'TimeEntry', ['floor'], { memberId });
 }
 

@@ -19,6 +19,6 @@ export type JobInvoice = {
 
 /** What jobs need to know of invoices, which stand above them; see `ClockedTime`. */
 export interface JobBilling {
-  /** All invoices of the job, those that bill a stage and the others. */
+  /** All invoices of the job, oldest first: those that bill a stage and the others. */
   invoicesOf(scope: ShopScope, jobId: string): Promise<JobInvoice[]>;
 }

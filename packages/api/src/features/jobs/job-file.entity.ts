@@ -1,3 +1,4 @@
+import type { JobFileType } from '@bookmatch/common/jobs/job-files-contract';
 import { Column, Entity, ForeignKey, Index } from 'typeorm';
 import { flag, id, line, whole, word } from '../../platform/database/columns.js';
 import { ShopRow } from '../../platform/database/rows.js';
@@ -22,7 +23,7 @@ export class JobFile extends ShopRow {
   @Column(id()) jobId!: string;
   /** As the person's own device called it; text only, never part of a path. */
   @Column(line(200)) name!: string;
-  @Column(word()) mediaType!: string;
+  @Column(word()) mediaType!: JobFileType;
   @Column(whole()) bytes!: number;
   /** SHA-256 of the content, hex: the same photo sent twice is one file. */
   @Column(line(64)) sha256!: string;

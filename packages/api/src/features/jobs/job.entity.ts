@@ -17,6 +17,7 @@ import {
 } from '../../platform/database/columns.js';
 import { EditableRow } from '../../platform/database/rows.js';
 import { Customer, Site } from '../customers/customers-public.js';
+import { Estimate } from '../estimates/estimates-public.js';
 
 /** Accepted work. Its prices and plan are those of the accepted revision, or were given by hand for repeat work. */
 @Entity('job')
@@ -38,6 +39,11 @@ import { Customer, Site } from '../customers/customers-public.js';
   onDelete: 'RESTRICT',
   onUpdate: 'NO ACTION',
 })
+@ForeignKey(() => Estimate, ['shopId', 'estimateId'], ['shopId', 'id'], {
+  name: 'fk_job_estimate',
+  onDelete: 'RESTRICT',
+  onUpdate: 'NO ACTION',
+})
 export class Job extends EditableRow {
   @Column(whole()) number!: number;
   @Column(line(120)) title!: string;
@@ -52,6 +58,8 @@ export class Job extends EditableRow {
   @Column(optionalDate()) installOn!: string | null;
   /** The install date again, the end of time where there is none: lists are paged by columns that are never empty. */
   @Column(date()) installOrder!: string;
+  /** When somebody was last put on the job or taken off it. */
+  @Column(optionalInstant()) assignedAt!: Date | null;
   @Column(flag()) openToCrew!: boolean;
   @Column(notes()) notes!: string;
   @Column(optionalInstant()) closedAt!: Date | null;
