@@ -32,3 +32,19 @@ export const punchedSchema = z.object({
   clock: clockStateSchema,
 });
 export type Punched = z.infer<typeof punchedSchema>;
+
+/** Every job the member may clock in to, for whoever works on something that is not among the choices. */
+export const clockJobsSchema = z.object({
+  jobs: z.array(
+    z.object({
+      jobId: idSchema,
+      jobNumber: z.int(),
+      jobTitle: z.string(),
+      /** What was planned on it, in the shop's order. */
+      planned: z.array(z.object({ operationId: idSchema, minutesLeft: z.int() })),
+    }),
+  ),
+  /** The shop's operations that are done on a job, in its order; a job may need one that was not planned. */
+  operations: z.array(z.object({ operationId: idSchema, operationName: z.string() })),
+});
+export type ClockJobs = z.infer<typeof clockJobsSchema>;

@@ -81,6 +81,13 @@ describe('the clock', () => {
     expect(refuseClockIn(at('11:00'), now, span('12:00', null), [])?.detail).toMatch(/before it starts/);
   });
 
+  it('refuses to close an entry over time that was entered in its course', () => {
+    const meanwhile = [span('13:00', '14:00')];
+    expect(refuseClockOut(at('14:30'), now, span('12:00', null), meanwhile)?.detail).toMatch(/overlaps/);
+    expect(refuseClockIn(at('14:30'), now, span('12:00', null), meanwhile)?.detail).toMatch(/overlaps/);
+    expect(refuseClockOut(at('13:00'), now, span('12:00', null), meanwhile)).toBeNull();
+  });
+
   it('asks for the true end of an entry that was forgotten', () => {
     const forgotten = { startedAt: '2027-01-13T22:00:00.000Z', endedAt: null };
     expect(refuseClockOut(now, now, forgotten)?.detail).toMatch(/really stopped/);

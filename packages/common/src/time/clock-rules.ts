@@ -41,14 +41,23 @@ export function refuseClockIn(
   const start: Span = { startedAt: at, endedAt: null };
   return (
     atField(refuseTimes(start, now)) ??
-    (open && refuseClockOut(at, now, open)) ??
+    (open && refuseClockOut(at, now, open, others)) ??
     atField(refuseOverlap({ startedAt: at, endedAt: at }, others))
   );
 }
 
-/** Why an open entry cannot be closed at an instant, or null. */
-export function refuseClockOut(at: InstantText, now: InstantText, open: Span): Refusal | null {
-  return atField(refuseTimes({ startedAt: open.startedAt, endedAt: at }, now));
+/**
+ * Why an open entry cannot be closed at an instant, or null. Time that was entered into its course meanwhile, on another
+ * device or by a correction, has to lie after it.
+ */
+export function refuseClockOut(
+  at: InstantText,
+  now: InstantText,
+  open: Span,
+  others: readonly Span[] = [],
+): Refusal | null {
+  const closed: Span = { startedAt: open.startedAt, endedAt: at };
+  return atField(refuseTimes(closed, now) ?? refuseOverlap(closed, others));
 }
 
 /** Two stretches that touch do not overlap; an open one reaches on without end. */
