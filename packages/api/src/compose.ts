@@ -9,8 +9,21 @@ import { PasswordsService } from './features/accounts/passwords-service.js';
 import { sessionsRoutes } from './features/accounts/sessions-routes.js';
 import { customersRoutes } from './features/customers/customers-routes.js';
 import { CustomersService } from './features/customers/customers-service.js';
+import { cardPaymentsEvents } from './features/shops/card-payments-service.js';
+import { cardPaymentsRoutes } from './features/shops/card-payments-routes.js';
+import { acceptanceRoutes, invitationsRoutes } from './features/shops/invitations-routes.js';
+import { membersRoutes } from './features/shops/members-routes.js';
+import { createShopServices, type ShopServices } from './features/shops/shop-services.js';
+import { shopSettingsRoutes } from './features/shops/shop-settings-routes.js';
 import { createShop } from './features/shops/shops-public.js';
-import { memberAccess, membershipsOf } from './features/subscription/member-access.js';
+import { memberAccess, membershipsOf, refuseLapsed } from './features/subscription/member-access.js';
+import { subscriptionEvents, subscriptionOutbox } from './features/subscription/subscription-events.js';
+import { subscriptionRoutes } from './features/subscription/subscription-routes.js';
+import {
+  createSubscriptionServices,
+  type SubscriptionServices,
+} from './features/subscription/subscription-services.js';
+import { followMembersLater } from './features/subscription/subscription-sync.js';
 import { startTrial } from './features/subscription/trial.js';
 import { notFound } from './platform/http/problem-error.js';
 import type { Access } from './platform/http/mount.js';
@@ -32,11 +45,12 @@ export type Product = {
   setOpen(open: boolean): void;
   close(): Promise<void>;
 };
-export type Services = {
-  accounts: AccountsService;
-  passwords: PasswordsService;
-  customers: CustomersService;
-};
+export type Services = ShopServices &
+  SubscriptionServices & {
+    accounts: AccountsService;
+    passwords: PasswordsService;
+    customers: CustomersService;
+  };
 
 /** Wires everything. The only place that knows which service needs which. */
 export function compose(platform: Platform): Product {
@@ -45,7 +59,14 @@ export function compose(platform: Platform): Product {
   const mailer = new Mailer(platform.config.mail, documentMaker({}));
   const outbox = new OutboxWorker(
     platform.dataSource,
-    { ...outboxHandlers(mailer, {}), ...accountsOutbox({ ...services, ...platform }) },
+    {
+      ...outboxHandlers(mailer, {
+        ...subscriptionEvents({ ...services, ...platform }),
+        ...cardPaymentsEvents(services.cardPayments),
+      }),
+      ...accountsOutbox({ ...services, ...platform }),
+      ...subscriptionOutbox({ ...services, ...platform }),
+    },
     platform.clock,
     platform.log,
   );
@@ -74,7 +95,8 @@ export function compose(platform: Platform): Product {
   };
 }
 
-function createServices({ config }: Platform): Services {
+function createServices(platform: Platform): Services {
+  const { config } = platform;
   const accounts = new AccountsService(config.origin, {
     async createShop(scope, personId, input) {
       const shopId = await createShop(scope, personId, input);
@@ -86,6 +108,8 @@ function createServices({ config }: Platform): Services {
   return {
     accounts,
     passwords: new PasswordsService(config.origin),
+    ...createShopServices(platform, { membersChanged: followMembersLater, refuseLapsed }),
+    ...createSubscriptionServices(platform),
     customers: new CustomersService(),
   };
 }
@@ -95,6 +119,12 @@ function createRoutes(services: Services, { sessions }: Platform): Route[] {
     ...accountsRoutes(services.accounts),
     ...sessionsRoutes(services.accounts, sessions),
     ...passwordsRoutes(services.passwords),
+    ...shopSettingsRoutes(services.settings),
+    ...membersRoutes(services.members),
+    ...invitationsRoutes(services.invitations),
+    ...acceptanceRoutes(services.acceptance, (scope, personId) => services.accounts.session(scope, personId)),
+    ...cardPaymentsRoutes(services.cardPayments),
+    ...subscriptionRoutes(services.subscription),
     ...customersRoutes(services.customers),
   ];
 }

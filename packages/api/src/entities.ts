@@ -26,6 +26,7 @@ import { JobFile } from './features/jobs/job-file.entity.js';
 import { JobOperation } from './features/jobs/job-operation.entity.js';
 import { JobPlannedCost } from './features/jobs/job-planned-cost.entity.js';
 import { JobStageChange } from './features/jobs/job-stage-change.entity.js';
+import { Invitation } from './features/shops/invitation.entity.js';
 import { Member } from './features/shops/member.entity.js';
 import { Operation } from './features/shops/operation.entity.js';
 import { Shop } from './features/shops/shop.entity.js';
@@ -47,6 +48,7 @@ export const ENTITIES: readonly EntityClass[] = [
   // shops
   Shop,
   Member,
+  Invitation,
   ShopCounter,
   Operation,
   // subscription

@@ -23,6 +23,7 @@ const GLOBAL_TABLES = new Set([
 const FINDS_THE_SHOP = new Set([
   'member.ix_member_person', // a person's memberships at sign-in
   'subscription.uq_subscription_provider', // the shop behind a webhook
+  'subscription.uq_subscription_customer', // the same
   'customer_link.ix_customer_link_id', // the shop behind a customer's link
   'invitation.uq_invitation_token', // the shop behind an invitation
 ]);

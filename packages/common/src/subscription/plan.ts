@@ -1,4 +1,7 @@
-/** The one plan: what it costs and how long things last. Read by the rules, the pages and the demo alike. */
+/**
+ * The one plan: what it costs and how long things last, for the rules, the pages and the demo. What a shop is shown and
+ * charged is the payment provider's price, named by configuration; the figure here is for those who have no shop yet.
+ */
 export const PLAN = {
   name: 'Bookmatch',
   /** A month, for each active member. */

@@ -1,20 +1,16 @@
 import type { Address } from '@bookmatch/common/customers/customers-contract';
+import { DEFAULT_BILLING_SCHEDULE, NEW_SHOP } from '@bookmatch/common/shops/new-shop';
+import type { CreateShop } from '@bookmatch/common/shops/shops-contract';
 import type { GlobalScope } from '../../platform/database/scope.js';
 import { Member } from './member.entity.js';
 import { createDefaultOperations } from './operations-service.js';
 import { createCounters } from './shop-counters.js';
 import { Shop } from './shop.entity.js';
 
-type NewShop = { shopName: string; timeZone: string; unitSystem: 'inch' | 'metric' };
 const NO_ADDRESS: Address = { street: '', street2: '', city: '', region: '', postalCode: '' };
-/** What a shop starts with until it sets its own: half down, the rest when installed. */
-const FIRST_SCHEDULE = [
-  { name: 'Deposit', share: { percent: '50' }, deposit: true, due: 'on-acceptance' },
-  { name: 'Installed', share: { remainder: true }, deposit: false, due: 'by-hand' },
-];
 
 /** Makes a shop with its owner and its counters, and answers the shop's id. */
-export async function createShop(scope: GlobalScope, personId: string, input: NewShop): Promise<string> {
+export async function createShop(scope: GlobalScope, personId: string, input: CreateShop): Promise<string> {
   const shop = await scope.global(Shop).insert({
     id: scope.newId(),
     version: 1,
@@ -26,13 +22,8 @@ export async function createShop(scope: GlobalScope, personId: string, input: Ne
     address: NO_ADDRESS,
     timeZone: input.timeZone,
     unitSystem: input.unitSystem,
-    currency: 'USD',
-    taxRule: 'on-price',
-    defaultTaxRate: '0',
-    estimateTerms: '',
-    estimateValidDays: 30,
-    invoiceDueDays: 14,
-    defaultBillingSchedule: FIRST_SCHEDULE,
+    ...NEW_SHOP,
+    defaultBillingSchedule: [...DEFAULT_BILLING_SCHEDULE],
     paymentAccountId: null,
     cardPayments: 'not-set-up',
   });

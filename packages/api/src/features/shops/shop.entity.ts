@@ -1,4 +1,5 @@
 import type { Address } from '@bookmatch/common/customers/customers-contract';
+import type { BillingStagePlan } from '@bookmatch/common/estimates/billing-schedule-contract';
 import { Column, Entity, Index } from 'typeorm';
 import {
   document,
@@ -35,7 +36,7 @@ export class Shop extends GlobalRow {
   @Column(notes()) estimateTerms!: string;
   @Column(whole()) estimateValidDays!: number;
   @Column(whole()) invoiceDueDays!: number;
-  @Column(document()) defaultBillingSchedule!: unknown;
+  @Column(document()) defaultBillingSchedule!: BillingStagePlan[];
   /** The shop's own account at the payment provider, where its customers' card payments settle. */
   @Column(optionalLine(60)) paymentAccountId!: string | null;
   @Column(word()) cardPayments!: 'not-set-up' | 'in-progress' | 'ready';

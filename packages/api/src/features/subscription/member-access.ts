@@ -1,15 +1,16 @@
 import type { Membership } from '@bookmatch/common/accounts/accounts-contract';
 import type { Role } from '@bookmatch/common/access/roles';
 import type { GlobalScope, ShopScope } from '../../platform/database/scope.js';
+import { ProblemError } from '../../platform/http/problem-error.js';
 import { Member, Shop } from '../shops/shops-public.js';
-import { standingOf, type StoredSubscription } from './standing.js';
+import { standingOf, subscriptionOf, type StoredStanding } from './subscription-facts.js';
 import { Subscription } from './subscription.entity.js';
 
-const STANDING_COLUMNS = {
+const STANDING_COLUMNS: Record<keyof StoredStanding, string> = {
   status: 'subscription.status',
   trialEndsAt: 'subscription.trialEndsAt',
-  currentPeriodEnd: 'subscription.currentPeriodEnd',
   graceEndsAt: 'subscription.graceEndsAt',
+  providerSubscriptionId: 'subscription.providerSubscriptionId',
 };
 
 /** The member a person is in the shop, and whether the shop may write: one look-up at every request. */
@@ -19,13 +20,19 @@ export async function memberAccess(scope: ShopScope, personId: string) {
     .join(Subscription, 'subscription', '1 = 1')
     .pick({ memberId: 'member.id', role: 'member.role', ...STANDING_COLUMNS })
     .where('member.personId = :personId and member.removedAt is null', { personId })
-    .first<{ memberId: string; role: Role } & StoredSubscription>();
+    .first<{ memberId: string; role: Role } & StoredStanding>();
   if (!row) return null;
   return {
     memberId: row.memberId,
     role: row.role,
     readOnly: standingOf(row, scope.now).access === 'read-only',
   };
+}
+
+/** For work in a shop that no member of it asks for. @throws subscription-lapsed */
+export async function refuseLapsed(scope: ShopScope): Promise<void> {
+  if (standingOf(await subscriptionOf(scope), scope.now).access === 'read-only')
+    throw new ProblemError('subscription-lapsed', "The shop's subscription has lapsed. Ask its owner.");
 }
 
 /** All shops a person belongs to, by name. */
@@ -38,8 +45,6 @@ export async function membershipsOf(scope: GlobalScope, personId: string): Promi
 
 async function viewMembership(scope: GlobalScope, member: Member): Promise<Membership> {
   const shop = await scope.global(Shop).get(member.shopId);
-  const [subscription] = await scope.forShop(member.shopId).rows(Subscription).findBy({});
-  if (!subscription) throw new TypeError('The shop has no subscription row.');
   return {
     shopId: shop.id,
     slug: shop.slug,
@@ -48,7 +53,7 @@ async function viewMembership(scope: GlobalScope, member: Member): Promise<Membe
     role: member.role,
     unitSystem: shop.unitSystem,
     timeZone: shop.timeZone,
-    currency: shop.currency as Membership['currency'],
-    subscription: standingOf(subscription, scope.now),
+    currency: shop.currency,
+    subscription: standingOf(await subscriptionOf(scope.forShop(shop.id)), scope.now),
   };
 }

@@ -2,6 +2,7 @@ import { PROBLEMS, type Problem } from '@bookmatch/common/problems/problem';
 import type { ErrorRequestHandler, Response } from 'express';
 import type { Logger } from '../log/logger.js';
 import { ProblemError } from './problem-error.js';
+import { isProviderDown } from '../payments/provider-down.js';
 import { isBrokenReference, isDuplicateKey } from '../database/retry.js';
 
 /** The last middleware: turns whatever was thrown into a problem document. Faults are logged once, with a reference. */
@@ -43,6 +44,8 @@ function toProblem(error: unknown): ProblemError {
   if (isBrokenReference(error))
     return new ProblemError('not-found', 'Something this refers to does not exist.');
   if (isDuplicateKey(error)) return new ProblemError('conflict', 'This exists already.');
+  if (isProviderDown(error))
+    return new ProblemError('not-ready', 'The payment provider does not answer. Try again in a minute.');
   return (
     fromParser(error) ?? new ProblemError('fault', 'Something went wrong on our side. Nothing was changed.')
   );
