@@ -1,7 +1,7 @@
 import { html, type SafeHtml } from './html-text.js';
 import { inboxStyle } from './inbox-style.js';
 import type { MailboxFilter } from './mailbox.js';
-import { attachmentPath } from './message-json.js';
+import { attachmentPath, linksOf } from './message-json.js';
 import type { KeptMessage } from './message.js';
 
 /** The list, newest first, with a filter by recipient and subject. */
@@ -23,7 +23,7 @@ export function messagePage(message: KeptMessage): string {
     html`<p class="bar"><a href="/">All messages</a></p>
       <h1>${title}</h1>
       <div class="panel padded">${facts(message)}</div>
-      ${attachments(message)} ${message.html ? formatted(message) : html``}
+      ${attachments(message)} ${message.html ? formatted(message) : links(message)}
       <h2>As plain text</h2>
       <div class="panel padded"><pre>${message.text || 'This message has no text.'}</pre></div>`,
   );
@@ -127,6 +127,16 @@ function formatted({ id }: KeptMessage): SafeHtml {
         sandbox="allow-popups allow-popups-to-escape-sandbox allow-top-navigation-by-user-activation"
       ></iframe>
     </div>`;
+}
+
+/** Plain text cannot be clicked. */
+function links(message: KeptMessage): SafeHtml {
+  const found = linksOf(message);
+  if (found.length === 0) return html``;
+  return html`<h2>Links</h2>
+    <ul class="panel mails">
+      ${found.map((link) => html`<li><a href="${link}">${link}</a></li>`)}
+    </ul>`;
 }
 
 function files({ attachments: { length } }: KeptMessage): string {

@@ -147,6 +147,14 @@ describe('the inbox in the browser', () => {
     }
   });
 
+  it('offers the links of a message that has only text', async () => {
+    await send({ text: 'Read http://localhost:4310/e/abc?x=1&y=2 or javascript:alert(1)' });
+    const [message] = await messages();
+    const page = await pageText(`/messages/${message?.id}`);
+    expect(page).toContain('href="http://localhost:4310/e/abc?x=1&amp;y=2"');
+    expect(page).not.toContain('href="javascript:');
+  });
+
   it('gives the HTML of a message in a sandbox that runs nothing', async () => {
     await send({ html: '<html><head></head><body><script>alert(1)</script></body></html>' });
     const [message] = await messages();

@@ -24,7 +24,8 @@ export function attachmentPath(id: string, index: number): string {
   return `/messages/${id}/attachments/${index}`;
 }
 
-function linksOf({ text, html }: KeptMessage): string[] {
+/** Every http(s) address in the text and in the HTML's links, each once, in order. */
+export function linksOf({ text, html }: KeptMessage): string[] {
   const inText = text.match(/https?:\/\/[^\s<>"')\]]+/g) ?? [];
   const inHtml = [...html.matchAll(/href="(https?:\/\/[^"]+)"/g)].map(([, address]) =>
     unescapeHtml(address ?? ''),
