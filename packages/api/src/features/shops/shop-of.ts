@@ -1,0 +1,9 @@
+import { dateIn } from '@bookmatch/common/calendar/shop-dates';
+import type { ShopScope } from '../../platform/database/scope.js';
+import { Shop } from './shop.entity.js';
+
+/** The shop that the request is about. */
+export const shopOf = (scope: ShopScope): Promise<Shop> => scope.global(Shop).get(scope.shopId);
+
+/** The date on the wall of the shop. */
+export const todayAt = (shop: Shop, now: Date): string => dateIn(shop.timeZone, now.toISOString());
