@@ -26,6 +26,9 @@ import { JobFile } from './features/jobs/job-file.entity.js';
 import { JobOperation } from './features/jobs/job-operation.entity.js';
 import { JobPlannedCost } from './features/jobs/job-planned-cost.entity.js';
 import { JobStageChange } from './features/jobs/job-stage-change.entity.js';
+import { Lead } from './features/leads/lead.entity.js';
+import { LeadNote } from './features/leads/lead-note.entity.js';
+import { LeadStageChange } from './features/leads/lead-stage-change.entity.js';
 import { Invitation } from './features/shops/invitation.entity.js';
 import { Member } from './features/shops/member.entity.js';
 import { Operation } from './features/shops/operation.entity.js';
@@ -56,6 +59,10 @@ export const ENTITIES: readonly EntityClass[] = [
   // customers
   Customer,
   Site,
+  // leads
+  Lead,
+  LeadNote,
+  LeadStageChange,
   // estimates
   Estimate,
   EstimateRevision,
@@ -84,4 +91,6 @@ export const APPEND_ONLY_TABLES: readonly string[] = [
   'estimate_acceptance',
   'job_cost',
   'job_stage_change',
+  'lead_note',
+  'lead_stage_change',
 ];

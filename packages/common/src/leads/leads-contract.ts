@@ -100,7 +100,8 @@ export type ConvertLead = z.infer<typeof convertLeadSchema>;
 /** Needs a customer on the lead. Moves the lead on to `estimating`. */
 export const startEstimateSchema = z.strictObject({
   title: lineSchema(120, 'The title'),
-  siteId: idSchema.nullable().default(null),
+  /** Left out: the lead's own site. */
+  siteId: idSchema.nullable().optional(),
 });
 export type StartEstimate = z.infer<typeof startEstimateSchema>;
 export const startedEstimateSchema = z.object({ estimateId: idSchema });
@@ -117,6 +118,16 @@ export const leadNoteSchema = z.object({
 });
 export type LeadNote = z.infer<typeof leadNoteSchema>;
 export const leadNotesSchema = rowsSchema(leadNoteSchema);
+
+/** A step from stage to stage. The first has no stage before it; the system takes a step when a customer accepts. */
+export const leadStageChangeSchema = z.object({
+  id: idSchema,
+  fromStage: leadStageSchema.nullable(),
+  toStage: leadStageSchema,
+  by: z.string().nullable(),
+  changedAt: instantSchema,
+});
+export type LeadStageChange = z.infer<typeof leadStageChangeSchema>;
 
 const moneyOfLead = { expectedCents: nonNegativeCentsSchema.nullable().optional() };
 
@@ -136,12 +147,15 @@ export const leadSchema = z.object({
   customerId: idSchema.nullable(),
   customerName: z.string().nullable(),
   siteId: idSchema.nullable(),
+  siteName: z.string().nullable(),
   lostReason: lostReasonSchema.nullable(),
   lostNote: z.string(),
   stageChangedAt: instantSchema,
   createdAt: instantSchema,
   /** One step on: the estimates that were started from this lead. */
   estimates: z.array(z.object({ id: idSchema, number: z.int(), title: z.string() })),
+  /** Every step it took, the oldest first. */
+  stageChanges: z.array(leadStageChangeSchema),
   // money
   ...moneyOfLead,
 });
@@ -175,11 +189,16 @@ export const leadListQuerySchema = listQuerySchema(LEAD_SORT_KEYS).extend({
 });
 export type LeadListQuery = z.infer<typeof leadListQuerySchema>;
 
+export const leadExportQuerySchema = leadListQuerySchema.omit({ after: true, limit: true });
+export type LeadExportQuery = z.infer<typeof leadExportQuerySchema>;
+
 /** How many leads a column of the board shows before it points to the list. */
 export const BOARD_COLUMN_LIMIT = 30;
 export const leadBoardQuerySchema = leadListQuerySchema.pick({ q: true, source: true, nextStep: true });
 export type LeadBoardQuery = z.infer<typeof leadBoardQuerySchema>;
 
+/** The board shows what was won and lost in this many days. */
+export const BOARD_CLOSED_DAYS = 90;
 /** A column for every stage, in order; won and lost hold the last 90 days. Rows: the soonest next step first. */
 export const leadBoardSchema = z.object({
   columns: z.array(

@@ -19,11 +19,13 @@ export function buildLead(overrides: Partial<Lead> = {}): Lead {
     customerId: null,
     customerName: null,
     siteId: null,
+    siteName: null,
     lostReason: null,
     lostNote: '',
     stageChangedAt: MADE_AT,
     createdAt: MADE_AT,
     estimates: [],
+    stageChanges: [],
     expectedCents: 1_400_000,
     ...overrides,
   };

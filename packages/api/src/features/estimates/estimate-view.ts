@@ -10,6 +10,7 @@ import { estimateStatus } from '@bookmatch/common/estimates/revision-stages';
 import { sendRefusals } from '@bookmatch/common/estimates/send-refusals';
 import type { ShopScope } from '../../platform/database/scope.js';
 import { Customer, Site } from '../customers/customers-public.js';
+import { Lead } from '../leads/leads-public.js';
 import { EstimateAcceptance } from './estimate-acceptance.entity.js';
 import type { EstimateHooks } from './estimate-hooks.js';
 import { questionsOf } from './estimate-questions.js';
@@ -37,7 +38,6 @@ export async function viewEstimate(
     title: estimate.title,
     status: estimateStatus(revisions, today),
     ...(await peopleOf(scope, estimate)),
-    lead: null,
     job: await hooks.jobOf(scope, id),
     currentRevision: viewRevision(current, await loadContent(scope, current), today),
     revisions: revisions.map(viewSummary),
@@ -82,10 +82,15 @@ function viewSummary(row: EstimateRevision): RevisionSummary {
 async function peopleOf(
   scope: ShopScope,
   estimate: Estimate,
-): Promise<Pick<EstimateView, 'customer' | 'site'>> {
+): Promise<Pick<EstimateView, 'customer' | 'site' | 'lead'>> {
   const { id, name, email, taxExempt } = await scope.rows(Customer).get(estimate.customerId);
   const site = estimate.siteId === null ? null : await scope.rows(Site).get(estimate.siteId);
-  return { customer: { id, name, email, taxExempt }, site: site && { id: site.id, name: site.name } };
+  const lead = estimate.leadId === null ? null : await scope.rows(Lead).get(estimate.leadId);
+  return {
+    customer: { id, name, email, taxExempt },
+    site: site && { id: site.id, name: site.name },
+    lead: lead && { id: lead.id, title: lead.title },
+  };
 }
 
 async function sendsOf(scope: ShopScope, estimateId: string, revisions: readonly EstimateRevision[]) {

@@ -3,6 +3,7 @@ import { Column, Entity, ForeignKey, Index } from 'typeorm';
 import { id, line, optionalId, optionalInstant, whole, word } from '../../platform/database/columns.js';
 import { EditableRow } from '../../platform/database/rows.js';
 import { Customer, Site } from '../customers/customers-public.js';
+import { Lead } from '../leads/leads-public.js';
 
 /** The priced offer. Its price stands in its revisions. */
 @Entity('estimate')
@@ -20,6 +21,11 @@ import { Customer, Site } from '../customers/customers-public.js';
 })
 @ForeignKey(() => Site, ['shopId', 'siteId'], ['shopId', 'id'], {
   name: 'fk_estimate_site',
+  onDelete: 'RESTRICT',
+  onUpdate: 'NO ACTION',
+})
+@ForeignKey(() => Lead, ['shopId', 'leadId'], ['shopId', 'id'], {
+  name: 'fk_estimate_lead',
   onDelete: 'RESTRICT',
   onUpdate: 'NO ACTION',
 })

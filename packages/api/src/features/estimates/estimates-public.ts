@@ -9,4 +9,5 @@ export type { EstimateHooks } from './estimate-hooks.js';
 export { EstimateQuestion } from './estimate-question.entity.js';
 export { EstimateQuestions } from './estimate-questions.js';
 export { EstimateRevision } from './estimate-revision.entity.js';
+export { estimatesOfLead } from './estimates-of-lead.js';
 export { EstimatesService } from './estimates-service.js';

@@ -18,6 +18,7 @@ import {
 import type { ShopScope } from '../../platform/database/scope.js';
 import { conflict, notFound, refuse } from '../../platform/http/problem-error.js';
 import { Customer, Site } from '../customers/customers-public.js';
+import { beginEstimating } from '../leads/leads-public.js';
 import { shopOf, takeNumber, todayAt } from '../shops/shops-public.js';
 import { copiedContent } from './copied-content.js';
 import type { EstimateHooks } from './estimate-hooks.js';
@@ -45,6 +46,7 @@ export class EstimatesService {
 
   async create(scope: ShopScope, input: CreateEstimate): Promise<EstimateView> {
     const customer = await customerWithSite(scope, input);
+    if (input.leadId !== null) await beginEstimating(scope, input.leadId, input.customerId);
     const content = firstContent(await shopOf(scope), customer, () => scope.newId(), scope.now);
     return this.get(scope, await insertEstimate(scope, input, content));
   }

@@ -1,0 +1,3 @@
+/** What other slices may use of `leads`. */
+export { Lead } from './lead.entity.js';
+export { beginEstimating, markWon } from './lead-steps.js';
