@@ -30,7 +30,7 @@ import { SHOP_CURRENCY, SHOP_UNITS, SHOP_ZONE } from './ui/formats/shop-settings
 const formFields: MatFormFieldDefaultOptions = {
   appearance: 'outline',
   floatLabel: 'auto',
-  subscriptSizing: 'fixed',
+  subscriptSizing: 'dynamic',
 };
 
 /** The only place that wires the application: what the platform leaves open is filled here. */

@@ -13,6 +13,11 @@ import {
   type SignIn,
   type SignUp,
 } from '@bookmatch/common/accounts/accounts-contract';
+import {
+  invitationOfferSchema,
+  type AcceptInvitation,
+  type InvitationOffer,
+} from '@bookmatch/common/shops/members-contract';
 import type { Observable } from 'rxjs';
 import { ApiClient, type CallOptions } from '../platform/api/api-client';
 
@@ -46,6 +51,16 @@ export class AccountsApiClient {
 
   resetPassword(fields: ResetPassword): Observable<void> {
     return this.api.post('/api/account/reset-password', fields, atTheDoor);
+  }
+
+  /** The link's secret travels in the body, out of logs and histories. */
+  invitationOffer(token: string): Observable<InvitationOffer> {
+    const options = { ...atTheDoor, answer: invitationOfferSchema };
+    return this.api.post('/api/account/invitation-offer', { token }, options);
+  }
+
+  acceptInvitation(fields: AcceptInvitation): Observable<Session> {
+    return this.api.post('/api/account/accept-invitation', fields, { ...atTheDoor, answer: sessionSchema });
   }
 
   rename(name: string): Observable<Person> {

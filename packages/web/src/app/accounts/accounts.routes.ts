@@ -28,4 +28,10 @@ export default [
     title: 'Choose a new password',
     loadComponent: () => import('./reset-password/reset-password').then(({ ResetPassword }) => ResetPassword),
   },
+  {
+    path: 'accept-invitation',
+    title: 'Join a shop',
+    loadComponent: () =>
+      import('./accept-invitation/accept-invitation').then(({ AcceptInvitation }) => AcceptInvitation),
+  },
 ] satisfies Routes;

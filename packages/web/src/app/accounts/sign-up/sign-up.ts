@@ -14,7 +14,7 @@ import { ErrorOf } from '../../ui/form-errors/error-of';
 import { focusFirstInvalid, FormErrors } from '../../ui/form-errors/form-errors';
 import { AccountsApiClient } from '../accounts-api';
 import { EntryFrame } from '../entry-frame/entry-frame';
-import { browserZone, HOME_ZONES, otherZones } from './time-zones';
+import { likelyZone, HOME_ZONES, otherZones } from './time-zones';
 
 /** Opens a shop: its owner, its time zone and how it measures. */
 @Component({
@@ -50,7 +50,7 @@ export class SignUp {
     email: '',
     password: '',
     shopName: '',
-    timeZone: browserZone(),
+    timeZone: likelyZone(),
     unitSystem: this.builder.control<UnitSystem>('inch'),
   });
   protected readonly submission = new Submission();

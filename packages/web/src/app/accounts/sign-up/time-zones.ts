@@ -15,7 +15,8 @@ export function otherZones(): string[] {
   return Intl.supportedValuesOf('timeZone').filter((zone) => !home.has(zone));
 }
 
-/** The zone this browser is in. */
-export function browserZone(): string {
-  return new Intl.DateTimeFormat().resolvedOptions().timeZone;
+/** The zone this browser is in, if it is a place; Eastern for one that only knows universal time. */
+export function likelyZone(zone = new Intl.DateTimeFormat().resolvedOptions().timeZone): string {
+  const offered = [...HOME_ZONES.map((home) => home.zone), ...otherZones()];
+  return offered.includes(zone) ? zone : 'America/New_York';
 }

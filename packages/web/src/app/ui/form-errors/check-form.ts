@@ -17,11 +17,17 @@ type Schema<Out> = {
  * @returns what is to be sent, or null when something needs correcting
  */
 export function checkForm<Out>(form: AbstractControl, schema: Schema<Out>): Out | null {
-  form.updateValueAndValidity();
+  forgetSentences(form);
   form.markAllAsTouched();
   const result = schema.safeParse(form.getRawValue());
   if (!result.success) placeFieldProblems(form, result.error.issues.map(toFieldProblem));
   return result.success && form.valid ? result.data : null;
+}
+
+/** What was said before may have been mended in another field: every control is judged afresh. */
+function forgetSentences(control: AbstractControl): void {
+  if ('controls' in control) Object.values(control.controls as AbstractControl[]).forEach(forgetSentences);
+  control.updateValueAndValidity({ onlySelf: true });
 }
 
 const toFieldProblem = (issue: { path: readonly PropertyKey[]; message: string }): FieldProblem => ({

@@ -1,4 +1,4 @@
-import { Directive, effect, ElementRef, inject, input } from '@angular/core';
+import { ChangeDetectorRef, Directive, effect, ElementRef, inject, input } from '@angular/core';
 import { toObservable, toSignal } from '@angular/core/rxjs-interop';
 import type { AbstractControl } from '@angular/forms';
 import { map, startWith, switchMap } from 'rxjs';
@@ -22,8 +22,11 @@ export class ErrorOf {
       ),
       { initialValue: '' },
     );
+    const view = inject(ChangeDetectorRef);
     effect(() => {
       host.textContent = message();
+      // A field learns of errors set from outside only when the view it stands in is looked at.
+      view.markForCheck();
     });
   }
 }

@@ -78,6 +78,19 @@ describe('checkForm', () => {
   });
 });
 
+describe('checkForm after a refusal', () => {
+  it('judges every field afresh, since another one may have mended it', () => {
+    const form = new FormGroup({
+      kind: new FormControl('homeowner', { nonNullable: true }),
+      name: new FormControl('Wren', { nonNullable: true }),
+      billingAddress: new FormGroup({ city: new FormControl('Stowe', { nonNullable: true }) }),
+    });
+    placeFieldProblems(form, [{ path: 'billingAddress.city', message: 'No such city.' }]);
+    expect(checkForm(form, createCustomerSchema)?.name).toBe('Wren');
+    expect(form.valid).toBe(true);
+  });
+});
+
 describe('FormErrors', () => {
   it('reads the refusal out, marks the field and puts the focus there', async () => {
     TestBed.configureTestingModule({ providers: [provideIcons()] });

@@ -38,12 +38,12 @@ describe('LeafPair', () => {
     expect(element.querySelectorAll('th[scope=row]')).toHaveLength(4);
   });
 
-  it('marks over and under, and neither when more is good', async () => {
+  it('marks over and under, and neither for what has not begun or when more is good', async () => {
     const { element, fixture } = await open();
     await fixture.whenStable();
     const tones = () =>
       [...element.querySelectorAll('tbody .difference')].map((cell) => cell.classList.item(1));
-    expect(tones()).toEqual(['under', 'over', 'under']);
+    expect(tones()).toEqual(['under', 'over', 'even']);
     fixture.componentRef.setInput('moreIsGood', true);
     await fixture.whenStable();
     expect(tones()).toEqual(['even', 'even', 'even']);

@@ -52,10 +52,10 @@ export class LeafPair {
     };
   }
 
-  /** Amber stays with the bars: only a difference that asks for a look is colored. */
+  /** What has not begun is neither under nor over. */
   private toneOf(row: LeafRow): string {
     const tone = leafTone(row);
-    return this.moreIsGood() || (row.planned === 0 && row.built === 0) ? 'even' : tone;
+    return this.moreIsGood() || row.built === 0 ? 'even' : tone;
   }
 }
 
