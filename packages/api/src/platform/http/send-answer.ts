@@ -1,4 +1,5 @@
 import type { Response } from 'express';
+import type { Readable } from 'node:stream';
 import type { Answered } from './idempotency.js';
 import type { Download } from './route.js';
 
@@ -45,5 +46,15 @@ function sendDownload(response: Response, { download }: Download): void {
     'X-Content-Type-Options': 'nosniff',
   });
   if (Buffer.isBuffer(body)) response.send(body);
-  else body.on('error', () => response.destroy()).pipe(response);
+  else sendStream(response, body);
+}
+
+/** A stream that breaks cuts the answer off, so that nobody takes half a file for the whole; the log says why. */
+function sendStream(response: Response, body: Readable): void {
+  body.on('error', (error) => {
+    response.req.log.error({ err: error }, 'a download broke');
+    response.destroy();
+  });
+  response.on('close', () => body.destroy());
+  body.pipe(response);
 }
