@@ -1,6 +1,7 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { TestBed } from '@angular/core/testing';
 import { Router } from '@angular/router';
+import type { Membership } from '@bookmatch/common/accounts/accounts-contract';
 import { buildMembership } from '../../testing/session';
 import { openShopScreen } from '../../testing/shop-screen';
 import { DataTableHarness } from '../../ui/data-table/data-table.harness';
@@ -9,8 +10,8 @@ import { buildCustomerRow } from '../testing/build-customer';
 
 const routes = [{ path: 'customers', children: customersRoutes }];
 
-async function open(url = '/customers', role: 'owner' | 'lead-hand' = 'owner') {
-  const screen = await openShopScreen(routes, url, buildMembership({ role }));
+async function open(url = '/customers', membership = buildMembership()) {
+  const screen = await openShopScreen(routes, url, membership);
   const loader = TestbedHarnessEnvironment.loader(screen.fixture);
   return { ...screen, table: await loader.getHarness(DataTableHarness) };
 }
@@ -43,10 +44,13 @@ describe('CustomerList', () => {
   });
 
   it('offers adding only to those who may', async () => {
-    const { element } = await open('/customers', 'owner');
-    expect(element.textContent).toContain('Add customer');
-    TestBed.resetTestingModule();
-    const other = await open('/customers', 'lead-hand');
-    expect(other.element.textContent).not.toContain('Add customer');
+    const offers = async (membership: Membership) => {
+      TestBed.resetTestingModule();
+      return (await open('/customers', membership)).element.textContent?.includes('Add customer');
+    };
+    const lapsed = { access: 'read-only', banner: 'read-only', daysLeft: null } as const;
+    expect(await offers(buildMembership())).toBe(true);
+    expect(await offers(buildMembership({ role: 'lead-hand' }))).toBe(false);
+    expect(await offers(buildMembership({ subscription: lapsed }))).toBe(false);
   });
 });

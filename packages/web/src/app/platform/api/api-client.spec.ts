@@ -126,6 +126,22 @@ describe('the idempotency key of a post', () => {
   });
 });
 
+describe('an anti-forgery cookie that is gone', () => {
+  it('is brought by the refusal, so the same request goes once more and only once', () => {
+    const { api, http } = setUp();
+    const codes: string[] = [];
+    api.post('/api/x', {}).subscribe({ error: (thrown: unknown) => codes.push(problemOf(thrown).code) });
+    const crossSite = { ...signedOut, status: 403, code: 'cross-site' };
+    const first = http.expectOne('/api/x');
+    first.flush(crossSite, { status: 403, statusText: '' });
+    const second = http.expectOne('/api/x');
+    expect(second.request.headers.get(KEY)).toBe(first.request.headers.get(KEY));
+    second.flush(crossSite, { status: 403, statusText: '' });
+    http.expectNone('/api/x');
+    expect(codes).toEqual(['cross-site']);
+  });
+});
+
 describe('a session that ended', () => {
   it('is renewed in place, and the request goes on with the same key', () => {
     const renewed = new Subject<void>();

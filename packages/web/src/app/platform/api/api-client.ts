@@ -3,7 +3,7 @@ import { inject, Injectable, isDevMode } from '@angular/core';
 import { catchError, defer, map, switchMap, tap, throwError, throwIfEmpty, type Observable } from 'rxjs';
 import { ActionKeys } from './action-keys';
 import { ApiProblem, toProblem } from './api-problem';
-import { isSignedOut, isUncertain } from './problem-kinds';
+import { isSignedOut, isUncertain, isUnverified } from './problem-kinds';
 import { queryParams, type Query } from './query-params';
 import { SESSION_RENEWAL } from './session-renewal';
 
@@ -85,6 +85,7 @@ export class ApiClient {
     once: Observable<unknown>,
     { whenSignedOut = 'renew' }: CallOptions<unknown>,
   ): Observable<unknown> {
+    if (isUnverified(error.problem)) return once;
     if (whenSignedOut === 'fail' || !isSignedOut(error.problem)) return throwError(() => error);
     return this.renewSession().pipe(
       switchMap(() => once),

@@ -2,6 +2,7 @@ import { inject, InjectionToken } from '@angular/core';
 import { createMongoAbility } from '@casl/ability';
 import { AbilityServiceSignal } from '@casl/angular';
 import type { Ability, Action, Subject } from '@bookmatch/common/access/ability';
+import { CurrentShop } from './current-shop';
 
 /** What the signed-in member may do; filled when the session is known, empty before. */
 export const ABILITY = new InjectionToken<Ability>('ABILITY');
@@ -19,9 +20,19 @@ export type Can = (
   field?: 'floor' | 'money',
 ) => boolean;
 
-/** In a field of a component: `protected readonly can = injectCan();`, in its template `can('create', 'Customer')`. */
+const CHANGES_NOTHING: ReadonlySet<Action> = new Set(['read', 'export']);
+
+/**
+ * In a field of a component: `protected readonly can = injectCan();`, in its template `can('create', 'Customer')`.
+ * While the subscription has lapsed only reading, exporting and the subscription itself are left.
+ */
 export function injectCan(): Can {
-  return inject<AbilityServiceSignal<Ability>>(AbilityServiceSignal).can;
+  const ability = inject<AbilityServiceSignal<Ability>>(AbilityServiceSignal);
+  const { readOnly } = inject(CurrentShop);
+  return (action, subject, field) => {
+    const open = !readOnly() || CHANGES_NOTHING.has(action) || subject === 'Subscription';
+    return open && ability.can(action, subject, field);
+  };
 }
 
 /** The row as the ability's conditions see it. A copy, since rows of the store cannot be marked. */

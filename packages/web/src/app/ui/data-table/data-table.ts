@@ -1,5 +1,6 @@
 import { NgTemplateOutlet } from '@angular/common';
 import {
+  booleanAttribute,
   ChangeDetectionStrategy,
   Component,
   computed,
@@ -37,7 +38,7 @@ export class DataTable<Row extends { id: string }> {
   readonly label = input.required<string>();
   readonly columns = input.required<readonly Column<Row>[]>();
   readonly rows = input.required<readonly Row[]>();
-  readonly loading = input(false);
+  readonly loading = input(false, { transform: booleanAttribute });
   readonly problem = input<Problem | null>(null);
   /** The address of a row's own screen; absent when rows do not open. */
   readonly rowLink = input<(row: Row) => string>();

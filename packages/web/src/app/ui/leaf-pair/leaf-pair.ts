@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import { booleanAttribute, ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
 import { MINUS } from '@bookmatch/common/money/format';
 import { leafBars, leafScale, leafTone, type LeafRow } from './leaf-row';
 
@@ -23,9 +23,9 @@ export class LeafPair {
   /** Stands in place of the total's difference: "on pace for $8,995". */
   readonly totalNote = input<string>();
   /** Beyond the plan is good here, as with what was billed. */
-  readonly moreIsGood = input(false);
+  readonly moreIsGood = input(false, { transform: booleanAttribute });
   /** True when a row's built figure opens its working. */
-  readonly opens = input(false);
+  readonly opens = input(false, { transform: booleanAttribute });
   readonly opened = output<LeafRow>();
 
   private readonly scale = computed(() => leafScale(this.rows()));

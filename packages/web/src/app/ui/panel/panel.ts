@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { booleanAttribute, ChangeDetectionStrategy, Component, input } from '@angular/core';
 
 let panels = 0;
 
@@ -25,6 +25,6 @@ let panels = 0;
 export class Panel {
   readonly heading = input('');
   /** Without padding, for a table that runs to the edges. */
-  readonly flush = input(false);
+  readonly flush = input(false, { transform: booleanAttribute });
   protected readonly headingId = `bm-panel-${panels++}`;
 }

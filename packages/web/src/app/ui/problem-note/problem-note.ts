@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, input, output } from '@angular/core';
+import { booleanAttribute, ChangeDetectionStrategy, Component, input, output } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { MatIcon } from '@angular/material/icon';
 import type { Problem } from '@bookmatch/common/problems/problem';
@@ -25,6 +25,6 @@ import type { Problem } from '@bookmatch/common/problems/problem';
 })
 export class ProblemNote {
   readonly problem = input.required<Problem>();
-  readonly retryable = input(false);
+  readonly retryable = input(false, { transform: booleanAttribute });
   readonly retry = output();
 }
