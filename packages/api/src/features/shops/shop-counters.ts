@@ -24,9 +24,18 @@ export async function createCounters(scope: ShopScope): Promise<void> {
  * that need a number wait for it.
  */
 export async function takeNumber(scope: ShopScope, kind: CounterKind): Promise<number> {
-  const counters = scope.rows(ShopCounter);
-  const counter = await counters.findOneBy({ kind }, true);
-  if (!counter) throw new TypeError(`The shop has no counter for ${kind}.`);
-  await counters.update(counter, { nextNumber: counter.nextNumber + 1 });
+  const counter = await lockCounter(scope, kind);
+  await scope.rows(ShopCounter).update(counter, { nextNumber: counter.nextNumber + 1 });
   return counter.nextNumber;
+}
+
+/**
+ * Waits until nobody else holds the counter, and holds it until the transaction ends. As the first statement of a
+ * transaction it makes the acts that need the counter queue up, where taking the number last would make all but one of
+ * them find their snapshot overtaken and start again.
+ */
+export async function lockCounter(scope: ShopScope, kind: CounterKind): Promise<ShopCounter> {
+  const counter = await scope.rows(ShopCounter).findOneBy({ kind }, true);
+  if (!counter) throw new TypeError(`The shop has no counter for ${kind}.`);
+  return counter;
 }

@@ -7,7 +7,7 @@ import { Person } from '../accounts/accounts-public.js';
 import { Member, Shop } from '../shops/shops-public.js';
 import { countMembers } from './owners.js';
 import { subscriptionOf } from './subscription-facts.js';
-import type { SubscriptionParts } from './subscription-service.js';
+import type { SubscriptionParts } from './subscription-parts.js';
 import { Subscription } from './subscription.entity.js';
 
 /** The provider takes no shorter trial. */

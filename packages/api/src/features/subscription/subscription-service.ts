@@ -3,24 +3,13 @@ import type { Subscription as SubscriptionView } from '@bookmatch/common/subscri
 import type { Redirect } from '@bookmatch/common/wire/fields';
 import type { ShopScope } from '../../platform/database/scope.js';
 import type { Stamp } from '../../platform/database/stamp.js';
-import type { UnitOfWork } from '../../platform/database/unit-of-work.js';
 import { conflict } from '../../platform/http/problem-error.js';
-import type { Payments } from '../../platform/payments/payments-client.js';
 import { Shop } from '../shops/shops-public.js';
 import { CheckoutPage } from './checkout-page.js';
 import { countMembers } from './owners.js';
-import type { PriceList } from './price-list.js';
 import { factsOf, standingOf, subscriptionOf } from './subscription-facts.js';
-import type { SubscriptionSync } from './subscription-sync.js';
-import { Subscription } from './subscription.entity.js';
-
-export type SubscriptionParts = {
-  payments: Payments;
-  work: UnitOfWork;
-  origin: string;
-  prices: PriceList;
-  sync: SubscriptionSync;
-};
+import type { SubscriptionParts } from './subscription-parts.js';
+import type { Subscription } from './subscription.entity.js';
 
 /** The shop's own subscription: how it stands, starting it, minding it. Money and card stay with the provider. */
 export class SubscriptionService {
