@@ -1,6 +1,7 @@
 import type { Request } from 'express';
 import * as z from 'zod';
 import { idSchema } from '@bookmatch/common/wire/fields';
+import { plainMessage } from '@bookmatch/common/wire/plain-messages';
 import { notFound, ProblemError } from './problem-error.js';
 
 const IS_ID = /^(?:id|.*Id)$/;
@@ -15,7 +16,7 @@ export function parseParams(request: Request): Record<string, string> {
 
 /** The query: unknown keys, repeated keys and wrong values answer 400. */
 export function parseQuery(schema: z.ZodType | undefined, query: unknown): unknown {
-  const parsed = (schema ?? z.strictObject({})).safeParse(query);
+  const parsed = (schema ?? z.strictObject({})).safeParse(query, { error: plainMessage });
   if (parsed.success) return parsed.data;
   throw new ProblemError('malformed-request', firstMessage(parsed.error), { fields: fieldsOf(parsed.error) });
 }
@@ -23,7 +24,7 @@ export function parseQuery(schema: z.ZodType | undefined, query: unknown): unkno
 /** The body: unknown keys and wrong values answer 422 with each field's own message. */
 export function parseBody(schema: z.ZodType | undefined, body: unknown): unknown {
   if (!schema) return undefined;
-  const parsed = schema.safeParse(body ?? {});
+  const parsed = schema.safeParse(body ?? {}, { error: plainMessage });
   if (parsed.success) return parsed.data;
   throw new ProblemError('invalid-input', firstMessage(parsed.error), { fields: fieldsOf(parsed.error) });
 }
