@@ -18,6 +18,12 @@ import { EstimateQuestion } from './features/estimates/estimate-question.entity.
 import { EstimateRevision } from './features/estimates/estimate-revision.entity.js';
 import { EstimateRoom } from './features/estimates/estimate-room.entity.js';
 import { EstimateSend } from './features/estimates/estimate-send.entity.js';
+import { CardCheckout } from './features/invoices/card-checkout.entity.js';
+import { CreditNote } from './features/invoices/credit-note.entity.js';
+import { Invoice } from './features/invoices/invoice.entity.js';
+import { InvoiceLetter } from './features/invoices/invoice-letter.entity.js';
+import { InvoiceLine } from './features/invoices/invoice-line.entity.js';
+import { Payment } from './features/invoices/payment.entity.js';
 import { Job } from './features/jobs/job.entity.js';
 import { JobAssignment } from './features/jobs/job-assignment.entity.js';
 import { JobBillingStage } from './features/jobs/job-billing-stage.entity.js';
@@ -29,6 +35,8 @@ import { JobStageChange } from './features/jobs/job-stage-change.entity.js';
 import { Lead } from './features/leads/lead.entity.js';
 import { LeadNote } from './features/leads/lead-note.entity.js';
 import { LeadStageChange } from './features/leads/lead-stage-change.entity.js';
+import { LedgerEntry } from './features/ledger/ledger-entry.entity.js';
+import { LedgerLine } from './features/ledger/ledger-line.entity.js';
 import { Invitation } from './features/shops/invitation.entity.js';
 import { Member } from './features/shops/member.entity.js';
 import { Operation } from './features/shops/operation.entity.js';
@@ -83,14 +91,29 @@ export const ENTITIES: readonly EntityClass[] = [
   JobOperation,
   JobPlannedCost,
   JobStageChange,
+  // ledger
+  LedgerEntry,
+  LedgerLine,
+  // invoices
+  Invoice,
+  InvoiceLine,
+  CardCheckout,
+  Payment,
+  CreditNote,
+  InvoiceLetter,
 ];
 
 /** Tables in which nothing is ever changed or removed: the application's database account may only read and insert. */
 export const APPEND_ONLY_TABLES: readonly string[] = [
   'audit_entry',
+  'credit_note',
   'estimate_acceptance',
+  'invoice_letter',
   'job_cost',
   'job_stage_change',
   'lead_note',
   'lead_stage_change',
+  'ledger_entry',
+  'ledger_line',
+  'payment',
 ];

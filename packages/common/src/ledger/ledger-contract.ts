@@ -54,6 +54,13 @@ export const ledgerListQuerySchema = listQuerySchema(LEDGER_SORT_KEYS).extend({
 });
 export type LedgerListQuery = z.infer<typeof ledgerListQuerySchema>;
 
+/** The whole ledger, or what counts between two days. */
+export const ledgerExportQuerySchema = z.strictObject({
+  from: dateSchema.optional(),
+  to: dateSchema.optional(),
+});
+export type LedgerExportQuery = z.infer<typeof ledgerExportQuerySchema>;
+
 export const trialBalanceQuerySchema = z.strictObject({
   /** Everything up to the end of this day; today when left out. */
   on: dateSchema.optional(),

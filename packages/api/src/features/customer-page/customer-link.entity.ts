@@ -3,6 +3,7 @@ import { id, instant, optionalId, optionalInstant } from '../../platform/databas
 import { ShopRow } from '../../platform/database/rows.js';
 import { Customer } from '../customers/customers-public.js';
 import { Estimate } from '../estimates/estimates-public.js';
+import { Invoice } from '../invoices/invoices-public.js';
 
 /** A customer's way in, to one estimate or one invoice. Its secret is not kept: it is signed anew from the id. */
 @Entity('customer_link')
@@ -17,6 +18,11 @@ import { Estimate } from '../estimates/estimates-public.js';
 })
 @ForeignKey(() => Estimate, ['shopId', 'estimateId'], ['shopId', 'id'], {
   name: 'fk_customer_link_estimate',
+  onDelete: 'RESTRICT',
+  onUpdate: 'NO ACTION',
+})
+@ForeignKey(() => Invoice, ['shopId', 'invoiceId'], ['shopId', 'id'], {
+  name: 'fk_customer_link_invoice',
   onDelete: 'RESTRICT',
   onUpdate: 'NO ACTION',
 })

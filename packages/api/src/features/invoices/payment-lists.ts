@@ -1,0 +1,57 @@
+import type { PaymentListQuery, PaymentRow } from '@bookmatch/common/invoices/invoices-contract';
+import type { Page } from '@bookmatch/common/wire/list';
+import type { ShopScope } from '../../platform/database/scope.js';
+import { keysetPage, likePattern } from '../../platform/http/keyset.js';
+import { Customer } from '../customers/customers-public.js';
+import { memberNames } from '../shops/shops-public.js';
+import { Invoice } from './invoice.entity.js';
+import { Payment } from './payment.entity.js';
+
+type StoredRow = Omit<PaymentRow, 'createdAt' | 'recordedBy'> & { memberId: string | null; createdAt: Date };
+
+/** Every payment of the shop, the last received first. */
+export async function listPayments(scope: ShopScope, request: PaymentListQuery): Promise<Page<PaymentRow>> {
+  const query = scope
+    .query(Payment, 'payment')
+    .join(Invoice, 'invoice', 'invoice.id = payment.invoiceId')
+    .join(Customer, 'customer', 'customer.id = invoice.customerId')
+    .leftJoin(Payment, 'reversal', 'reversal.reversesId = payment.id')
+    .pick({
+      id: 'payment.id',
+      kind: 'payment.kind',
+      method: 'payment.method',
+      amountCents: 'payment.amountCents',
+      appliedCents: 'payment.appliedCents',
+      receivedOn: 'payment.receivedOn',
+      reference: 'payment.reference',
+      reversesId: 'payment.reversesId',
+      reversedById: 'reversal.id',
+      reason: 'payment.reason',
+      memberId: 'payment.memberId',
+      createdAt: 'payment.createdAt',
+      invoiceId: 'payment.invoiceId',
+      invoiceNumber: 'invoice.number',
+      customerName: 'customer.name',
+    });
+  const { q, method, from, to } = request;
+  if (q) query.where('customer.name like :q or payment.reference like :q', { q: likePattern(q) });
+  if (method) query.where('payment.method = :method', { method });
+  if (from) query.where('payment.receivedOn >= :from', { from });
+  if (to) query.where('payment.receivedOn <= :to', { to });
+  const columns = {
+    id: 'payment.id',
+    sorts: { receivedOn: 'payment.receivedOn' },
+    standard: '-receivedOn',
+  } as const;
+  const page = await keysetPage<StoredRow, 'receivedOn'>(query, columns, request);
+  const names = await memberNames(scope);
+  return { ...page, rows: page.rows.map((row) => viewRow(row, names)) };
+}
+
+function viewRow({ memberId, ...row }: StoredRow, names: ReadonlyMap<string, string>): PaymentRow {
+  return {
+    ...row,
+    recordedBy: memberId ? (names.get(memberId) ?? null) : null,
+    createdAt: row.createdAt.toISOString(),
+  };
+}

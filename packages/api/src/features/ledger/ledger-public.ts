@@ -1,0 +1,2 @@
+/** What other slices may use of `ledger`. */
+export { openBooks, postEntry, type NewEntry } from './ledger-posting.js';
