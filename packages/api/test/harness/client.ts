@@ -10,7 +10,8 @@ export class Client {
   private cookies = new Map<string, string>();
 
   constructor(
-    private readonly server: Server,
+    /** A server of this process, or the address of one elsewhere. */
+    private readonly server: Server | string,
     private readonly origin: string,
     /** Put before paths that do not start with `/api`. */
     readonly prefix = '/api',
