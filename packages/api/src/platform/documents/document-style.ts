@@ -22,7 +22,7 @@ export const ROWS: CustomTableLayout = {
   vLineWidth: () => 0,
   hLineColor: (index) => (index === 1 ? QUIET : HAIRLINE),
   paddingLeft: (index) => (index === 0 ? 0 : 6),
-  paddingRight: () => 6,
+  paddingRight: (index, node) => (index === (node.table.widths?.length ?? 0) - 1 ? 0 : 6),
   paddingTop: () => 3.5,
   paddingBottom: () => 3.5,
 };
