@@ -73,6 +73,8 @@ import {
 } from './features/subscription/subscription-services.js';
 import { followMembersLater } from './features/subscription/subscription-sync.js';
 import { startTrial } from './features/subscription/trial.js';
+import { clockedTime, ClockService, EntriesService } from './features/time/time-public.js';
+import { timeRoutes } from './features/time/time-routes.js';
 import type { ShopScope } from './platform/database/scope.js';
 import type { Access } from './platform/http/mount.js';
 import type { Route } from './platform/http/route.js';
@@ -116,6 +118,8 @@ export type Services = ShopServices &
     jobCosts: JobCostsService;
     jobFiles: JobFilesService;
     invoices: InvoiceServices;
+    clock: ClockService;
+    timeEntries: EntriesService;
   };
 
 /** Wires everything. The only place that knows which service needs which. */
@@ -186,16 +190,14 @@ function createServices(platform: Platform): Services {
     jobs: new JobsService(JOBS_PARTS),
     jobCosts: new JobCostsService(),
     jobFiles: new JobFilesService(files),
+    clock: new ClockService(),
+    timeEntries: new EntriesService(),
   };
 }
 
 /** What jobs ask of the slices above them. */
 const JOBS_PARTS: JobsParts = {
-  time: {
-    byOperation: () => Promise.resolve([]),
-    clockedIn: () => Promise.resolve([]),
-    sums: { minutes: '0', costCents: '0' },
-  },
+  time: clockedTime,
   billing: jobInvoices,
   onClosed: async (scope, job) => earnDeposits(scope, job.id, todayAt(await shopOf(scope), scope.now)),
 };
@@ -256,6 +258,7 @@ function createRoutes(services: Services, { sessions }: Platform): Route[] {
     ...jobsRoutes(services.jobs, JOBS_PARTS.time),
     ...jobCostsRoutes(services.jobCosts),
     ...jobFilesRoutes(services.jobFiles),
+    ...timeRoutes(services),
     ...linksRoutes(services.links),
     ...customerPageRoutes({
       ...services,

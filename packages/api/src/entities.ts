@@ -43,6 +43,8 @@ import { Operation } from './features/shops/operation.entity.js';
 import { Shop } from './features/shops/shop.entity.js';
 import { ShopCounter } from './features/shops/shop-counter.entity.js';
 import { Subscription } from './features/subscription/subscription.entity.js';
+import { TimeCorrection } from './features/time/time-correction.entity.js';
+import { TimeEntry } from './features/time/time-entry.entity.js';
 
 /** Every table there is, slice by slice. */
 export const ENTITIES: readonly EntityClass[] = [
@@ -91,6 +93,9 @@ export const ENTITIES: readonly EntityClass[] = [
   JobOperation,
   JobPlannedCost,
   JobStageChange,
+  // time
+  TimeEntry,
+  TimeCorrection,
   // ledger
   LedgerEntry,
   LedgerLine,
@@ -116,4 +121,5 @@ export const APPEND_ONLY_TABLES: readonly string[] = [
   'ledger_entry',
   'ledger_line',
   'payment',
+  'time_correction',
 ];

@@ -6,6 +6,7 @@ import { JobsKnowTheirEstimate1796147211547 } from './202612011746-jobs-know-the
 import { InvoicesAndLedger1796147362217 } from './202612011749-invoices-and-ledger.js';
 import { LeadsAndTheirEstimates1796147529297 } from './202612011752-leads-and-their-estimates.js';
 import { InvitationsAndCheckout1796147597485 } from './202612011753-invitations-and-checkout.js';
+import { TimeEntries1796147912788 } from './202612011758-time-entries.js';
 
 /** Every migration, oldest first. */
 export const MIGRATIONS: readonly MigrationClass[] = [
@@ -16,4 +17,5 @@ export const MIGRATIONS: readonly MigrationClass[] = [
   InvoicesAndLedger1796147362217,
   LeadsAndTheirEstimates1796147529297,
   InvitationsAndCheckout1796147597485,
+  TimeEntries1796147912788,
 ];
