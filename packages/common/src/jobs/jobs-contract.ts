@@ -5,7 +5,7 @@ import {
   billingShareSchema,
   defaultBillingScheduleSchema,
 } from '../estimates/billing-schedule-contract.js';
-import { costCategorySchema } from '../estimates/cost-categories.js';
+import { costCategorySchema, timeCategorySchema } from '../estimates/cost-categories.js';
 import { invoiceStandingSchema } from '../invoices/invoice-standings.js';
 import {
   centsSchema,
@@ -100,6 +100,8 @@ export type AssignJob = z.infer<typeof assignJobSchema>;
 export const jobOperationSchema = z.object({
   operationId: idSchema,
   name: z.string(),
+  /** The row of the job's costs that its time falls in. */
+  category: timeCategorySchema,
   plannedMinutes: z.int(),
   clockedMinutes: z.int(),
   /** The part of it that falls in the shop's current workweek. */

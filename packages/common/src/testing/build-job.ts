@@ -6,6 +6,7 @@ export function buildJobOperation(overrides: Partial<JobOperation> = {}): JobOpe
   return {
     operationId: nextId(),
     name: 'Face frames',
+    category: 'labor',
     plannedMinutes: 540,
     clockedMinutes: 258,
     thisWeekMinutes: 0,

@@ -57,7 +57,7 @@ export const emailSchema = z
   .pipe(z.email({ error: 'This is not an e-mail address.' }));
 
 export const centsSchema = z
-  .int('Give an amount in whole cents.')
+  .int('Give an amount.')
   .min(-MAX_CENTS, 'This amount is too large.')
   .max(MAX_CENTS, 'This amount is too large.');
 export const positiveCentsSchema = centsSchema.min(1, 'Give an amount above zero.');

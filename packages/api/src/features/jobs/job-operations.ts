@@ -17,12 +17,13 @@ export async function viewOperations(
   const plans = new Map(planned.map((row) => [row.operationId, row]));
   const built = new Map(clocked.map((row) => [row.operationId, row]));
   const money = seesMoney(scope);
-  return operations.map(({ id, name }) => {
+  return operations.map(({ id, name, costCategory }) => {
     const plan = plans.get(id);
     const time = built.get(id);
     return {
       operationId: id,
       name,
+      category: costCategory,
       plannedMinutes: plan?.plannedMinutes ?? 0,
       clockedMinutes: time?.minutes ?? 0,
       thisWeekMinutes: time?.thisWeekMinutes ?? 0,

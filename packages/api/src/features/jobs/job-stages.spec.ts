@@ -221,11 +221,11 @@ describe('a job on its way', () => {
     expect(read.operations).toEqual([
       {
         ...{ operationId: cut!.id, name: cut!.name, plannedMinutes: 600, clockedMinutes: 240 },
-        ...{ thisWeekMinutes: 60, plannedCostCents: 0, actualCostCents: 20_000 },
+        ...{ category: 'labor', thisWeekMinutes: 60, plannedCostCents: 0, actualCostCents: 20_000 },
       },
       {
         ...{ operationId: install.id, name: install.name, plannedMinutes: 0, clockedMinutes: 30 },
-        ...{ thisWeekMinutes: 30, plannedCostCents: 0, actualCostCents: 2_500 },
+        ...{ category: 'install', thisWeekMinutes: 30, plannedCostCents: 0, actualCostCents: 2_500 },
       },
     ]);
     expect(read.operations.map((row) => row.operationId)).not.toContain(measure!.id);
