@@ -38,6 +38,7 @@ async function bench({ undo }) {
   const { owner } = database.credentials;
   const script = (name, more = {}) => runProgram(name, { ...env, BOOKMATCH_LOG_LEVEL: 'info', ...more });
   await script('packages/api/dist/migrate.js', migrationEnvironment(database));
+  await script('infra/dist/demo/main.js');
   const output = await script('infra/dist/bench/main.js', {
     BENCH_DB_USER: owner.user,
     BENCH_DB_PASSWORD: owner.password,

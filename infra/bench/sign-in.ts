@@ -1,0 +1,25 @@
+/** Signs in as the browser does and gives the cookies to send along. */
+export async function signIn(origin: string, email: string, password: string): Promise<string> {
+  const first = await fetch(`${origin}/api/openapi.json`);
+  const csrf = cookiesOf(first)['bookmatch-csrf'] ?? '';
+  const answer = await fetch(`${origin}/api/account/sign-in`, {
+    method: 'POST',
+    headers: {
+      'content-type': 'application/json',
+      origin,
+      cookie: `bookmatch-csrf=${csrf}`,
+      'x-csrf-token': decodeURIComponent(csrf),
+    },
+    body: JSON.stringify({ email, password }),
+  });
+  if (!answer.ok) throw new Error(`Could not sign in as ${email}: ${await answer.text()}`);
+  const all = { 'bookmatch-csrf': csrf, ...cookiesOf(answer) };
+  return Object.entries(all)
+    .map(([name, value]) => `${name}=${value}`)
+    .join('; ');
+}
+
+function cookiesOf(answer: Response): Record<string, string> {
+  const pairs = answer.headers.getSetCookie().map((line) => /^([^=]+)=([^;]*)/.exec(line));
+  return Object.fromEntries(pairs.filter((pair) => pair !== null).map(([, name, value]) => [name, value]));
+}
