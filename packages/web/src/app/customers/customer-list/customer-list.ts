@@ -48,7 +48,7 @@ export class CustomerList {
     ...CUSTOMER_KINDS.map((value) => ({ value, name: CUSTOMER_KIND_NAMES[value] })),
   ];
   protected readonly archivedChoices = [
-    { value: '', name: 'Without archived' },
+    { value: '', name: 'Not archived' },
     { value: 'only', name: 'Archived only' },
     { value: 'all', name: 'With archived' },
   ];

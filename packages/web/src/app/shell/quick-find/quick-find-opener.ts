@@ -14,6 +14,7 @@ export class QuickFindOpener {
         maxWidth: '94vw',
         position: { top: '10vh' },
         autoFocus: 'input',
+        ariaLabel: 'Find',
       }),
     );
   }
