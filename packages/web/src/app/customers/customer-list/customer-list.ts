@@ -56,7 +56,7 @@ export class CustomerList {
     { key: 'name', header: 'Name', sort: 'name', width: '28%' },
     { key: 'kind', header: 'Kind', text: ({ kind }) => CUSTOMER_KIND_NAMES[kind], phone: 'side' },
     { key: 'city', header: 'City', text: ({ city }) => city },
-    { key: 'phone', header: 'Phone', text: ({ phone }) => phone },
+    { key: 'phone', header: 'Phone', text: ({ phone }) => phone, whole: true },
     { key: 'email', header: 'E-mail', text: ({ email }) => email, phone: 'hidden' },
     { key: 'createdAt', header: 'Added', sort: 'createdAt', align: 'end', phone: 'hidden' },
   ];

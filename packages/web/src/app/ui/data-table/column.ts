@@ -8,7 +8,9 @@ export type Column<Row> = {
   align?: 'start' | 'end';
   /** The cell's text; a `bmCell` template of the same key takes its place. */
   text?: (row: Row) => string;
-  /** Where it stands in the two-line row of a phone; without it the first is the title, the others the second line. */
+  /** Where it stands in the two-line row of a narrow place; without it the first is the title, the others the second line. */
   phone?: 'title' | 'side' | 'line' | 'hidden';
+  /** Never broken over two lines: a phone number, a date. Figures at the end never are. */
+  whole?: boolean;
   width?: string;
 };
