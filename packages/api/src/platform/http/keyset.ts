@@ -22,7 +22,6 @@ export async function keysetPage<Row extends { id: string }, Key extends string>
   const descending = sort.startsWith('-');
   const column = columns.sorts[sort.replace(/^-/, '') as Key];
   const limit = request.limit ?? DEFAULT_LIMIT;
-  const total = request.after === undefined ? await query.count() : undefined;
 
   if (request.after !== undefined)
     applyCursor(query, column, columns.id, descending, readCursor(request.after));
@@ -35,11 +34,18 @@ export async function keysetPage<Row extends { id: string }, Key extends string>
     .all<Row & { _sortValue: unknown }>();
 
   const last = rows.length > limit ? rows[limit - 1] : undefined;
+  const total =
+    request.after === undefined ? await totalOf(query, rows.length, last !== undefined) : undefined;
   return {
     rows: rows.slice(0, limit),
     next: last ? writeCursor([cursorValue(last._sortValue), last.id]) : null,
     ...(total === undefined ? {} : { total }),
   };
+}
+
+/** Counted only when there is more than the page shows. */
+function totalOf(query: ShopQuery, shown: number, hasMore: boolean): Promise<number> | number {
+  return hasMore ? query.count() : shown;
 }
 
 function applyCursor(
