@@ -7,6 +7,7 @@ import { InvoicesAndLedger1796147362217 } from './202612011749-invoices-and-ledg
 import { LeadsAndTheirEstimates1796147529297 } from './202612011752-leads-and-their-estimates.js';
 import { InvitationsAndCheckout1796147597485 } from './202612011753-invitations-and-checkout.js';
 import { TimeEntries1796147912788 } from './202612011758-time-entries.js';
+import { EntriesKnowTheirInvoice1796148861361 } from './202612011814-entries-know-their-invoice.js';
 
 /** Every migration, oldest first. */
 export const MIGRATIONS: readonly MigrationClass[] = [
@@ -18,4 +19,5 @@ export const MIGRATIONS: readonly MigrationClass[] = [
   LeadsAndTheirEstimates1796147529297,
   InvitationsAndCheckout1796147597485,
   TimeEntries1796147912788,
+  EntriesKnowTheirInvoice1796148861361,
 ];

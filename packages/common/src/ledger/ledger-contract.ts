@@ -39,6 +39,8 @@ export const ledgerEntrySchema = z.object({
   memo: z.string(),
   lines: z.array(ledgerLineSchema).min(2),
   source: entrySourceSchema,
+  /** The invoice it is about, whatever it was made for. */
+  invoiceId: idSchema,
   createdAt: instantSchema,
 });
 export type LedgerEntry = z.infer<typeof ledgerEntrySchema>;
@@ -49,6 +51,7 @@ export const ledgerListQuerySchema = listQuerySchema(LEDGER_SORT_KEYS).extend({
   kind: entryKindSchema.optional(),
   customerId: idSchema.optional(),
   jobId: idSchema.optional(),
+  invoiceId: idSchema.optional(),
   from: dateSchema.optional(),
   to: dateSchema.optional(),
 });
@@ -99,6 +102,7 @@ export const accountActivityRowSchema = z.object({
   kind: entryKindSchema,
   memo: z.string(),
   source: entrySourceSchema,
+  invoiceId: idSchema,
   side: ledgerSideSchema,
   amountCents: centsSchema,
   /** The account's balance after this line, on its normal side. */

@@ -43,6 +43,7 @@ export class CreditsService {
       on: today,
       memo: `Credit note ${note.number} on invoice ${invoice.number}`,
       source: { kind: 'credit-note', id: note.id },
+      invoiceId,
       lines: postCreditNote(share, isUnearnedDeposit(invoice), invoice),
     });
     return note;

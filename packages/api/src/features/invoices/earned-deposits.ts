@@ -42,6 +42,7 @@ async function earn(scope: ShopScope, invoice: Invoice, today: string): Promise<
     on: today,
     memo: `Deposit of invoice ${invoice.number} earned`,
     source: { kind: 'invoice', id: invoice.id },
+    invoiceId: invoice.id,
     lines: postDepositEarned(left, invoice),
   });
 }

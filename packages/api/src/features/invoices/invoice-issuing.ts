@@ -56,6 +56,7 @@ export class InvoiceIssuing {
       on: today,
       memo: `Invoice ${issued.number}`,
       source: { kind: 'invoice', id: issued.id },
+      invoiceId: issued.id,
       lines: postInvoice(issued.kind, issued, issued),
     });
     if (issued.jobId) await earnDeposits(scope, issued.jobId, today);

@@ -146,6 +146,7 @@ export class PaymentsService {
       on: payment.receivedOn,
       memo: `${MEMOS[kind]} invoice ${invoice.number}`,
       source: { kind: 'payment', id: payment.id },
+      invoiceId: invoice.id,
       lines: posting(),
     });
   }

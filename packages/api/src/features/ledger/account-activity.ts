@@ -24,6 +24,7 @@ type StoredRow = {
   memo: string;
   sourceKind: EntrySource['kind'];
   sourceId: string;
+  invoiceId: string;
   side: 'debit' | 'credit';
   amountCents: number;
 };
@@ -72,6 +73,7 @@ function linesOf(scope: ShopScope, account: AccountCode, request: AccountActivit
       memo: 'entry.memo',
       sourceKind: 'entry.sourceKind',
       sourceId: 'entry.sourceId',
+      invoiceId: 'entry.invoiceId',
       side: 'line.side',
       amountCents: 'line.amountCents',
     })

@@ -11,6 +11,7 @@ import { Shop } from '../shops/shops-public.js';
 @Entity('ledger_entry')
 @Index('uq_ledger_entry_number', ['shopId', 'number'], { unique: true })
 @Index('uq_ledger_entry_source', ['shopId', 'sourceId', 'kind'], { unique: true })
+@Index('ix_ledger_entry_invoice', ['shopId', 'invoiceId', 'number'])
 @ForeignKey(() => Shop, ['shopId'], ['id'], {
   name: 'fk_ledger_entry_shop',
   onDelete: 'RESTRICT',
@@ -24,4 +25,6 @@ export class LedgerEntry extends ShopRow {
   @Column(line(200)) memo!: string;
   @Column(word()) sourceKind!: EntrySource['kind'];
   @Column(id()) sourceId!: string;
+  /** The invoice that the source belongs to, or is. */
+  @Column(id()) invoiceId!: string;
 }

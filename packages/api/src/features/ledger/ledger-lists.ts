@@ -19,6 +19,7 @@ type StoredEntry = {
   memo: string;
   sourceKind: EntrySource['kind'];
   sourceId: string;
+  invoiceId: string;
   createdAt: Date;
 };
 
@@ -50,13 +51,15 @@ function entriesQuery(scope: ShopScope, request: LedgerListQuery): ShopQuery {
     memo: 'entry.memo',
     sourceKind: 'entry.sourceKind',
     sourceId: 'entry.sourceId',
+    invoiceId: 'entry.invoiceId',
     createdAt: 'entry.createdAt',
   });
   if (request.q) query.where('entry.memo like :q', { q: likePattern(request.q) });
   if (request.kind) query.where('entry.kind = :kind', { kind: request.kind });
   if (request.from) query.where('entry.postedOn >= :from', { from: request.from });
   if (request.to) query.where('entry.postedOn <= :to', { to: request.to });
-  const { customerId, jobId } = request;
+  const { customerId, jobId, invoiceId } = request;
+  if (invoiceId) query.where('entry.invoiceId = :invoiceId', { invoiceId });
   if (customerId) query.where(hasLine('customer_id = :customerId'), { customerId });
   if (jobId) query.where(hasLine('job_id = :jobId'), { jobId });
   return query;

@@ -11,6 +11,7 @@ export type NewEntry = {
   on: string;
   memo: string;
   source: EntrySource;
+  invoiceId: string;
   lines: LedgerLine[];
 };
 
@@ -37,6 +38,7 @@ export async function postEntry(scope: ShopScope, entry: NewEntry): Promise<void
     memo: entry.memo,
     sourceKind: entry.source.kind,
     sourceId: entry.source.id,
+    invoiceId: entry.invoiceId,
   });
   await scope.rows(LedgerLineRow).insertMany(
     lines.map((line, position) => ({

@@ -50,6 +50,11 @@ describe('the ledger', () => {
     const { rows } = await entries({ kind: 'deposit-invoice' });
     expect((await entries({ jobId: rows[0]!.lines[0]!.jobId! })).total).toBe(1);
     expect((await entries({ to: '2026-05-31' })).total).toBe(1);
+    const [payment] = (await entries({ kind: 'payment' })).rows;
+    expect((await entries({ invoiceId: payment!.invoiceId })).rows.map(({ kind }) => kind)).toEqual([
+      'payment',
+      'invoice',
+    ]);
     expect((await entries({ q: 'Payment of' })).total).toBe(1);
     const page = await entries({ limit: '3' });
     expect(page.rows).toHaveLength(3);
@@ -123,6 +128,7 @@ describe('the ledger', () => {
         on: '2026-06-01',
         memo: 'Lopsided',
         source: { kind: 'payment', id },
+        invoiceId: id,
         lines: [
           { ...line, account: '1000', side: 'debit', amountCents: 100 },
           { ...line, account: '1200', side: 'credit', amountCents: 99 },
