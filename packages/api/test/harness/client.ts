@@ -94,6 +94,15 @@ export class Client {
     return this.finish(body === undefined ? call : call.send(body as object));
   }
 
+  /** What this browser sends along, for requests that a test puts together by hand. */
+  async credentials(): Promise<{ cookie: string; token: string }> {
+    return { token: await this.csrfToken(), cookie: this.cookieHeader() };
+  }
+
+  private cookieHeader(): string {
+    return [...this.cookies].map(([name, value]) => `${name}=${value}`).join('; ');
+  }
+
   private async csrfToken(): Promise<string> {
     if (!this.cookies.has('bookmatch-csrf')) await this.get('/api/openapi.json');
     return decodeURIComponent(this.cookies.get('bookmatch-csrf') ?? '');
@@ -104,7 +113,7 @@ export class Client {
   }
 
   private async finish(call: Test): Promise<Response> {
-    const cookie = [...this.cookies].map(([name, value]) => `${name}=${value}`).join('; ');
+    const cookie = this.cookieHeader();
     const response = await (cookie === '' ? call : call.set('Cookie', cookie));
     const set = (response.headers['set-cookie'] ?? []) as unknown as string[];
     for (const line of set) this.remember(line);

@@ -61,7 +61,7 @@ function handler(route: Route, options: MountOptions): RequestHandler {
     const input = await readInput(route, request, options, entered);
     const answered = await perform(route, input, options, entered);
     if (route.kind === 'account' && route.limit) await options.access.forgive(route.limit, request);
-    sendAnswer(response, answered);
+    await sendAnswer(response, answered);
   };
 }
 

@@ -3,10 +3,10 @@ import type { Readable } from 'node:stream';
 import type { Answered } from './idempotency.js';
 import type { Download } from './route.js';
 
-export function sendAnswer(response: Response, answered: Answered | Download): void {
+export async function sendAnswer(response: Response, answered: Answered | Download): Promise<void> {
   response.set('Cache-Control', 'no-store');
   if ('download' in answered) {
-    sendDownload(response, answered);
+    await sendDownload(response, answered);
     return;
   }
   const { status, body } = answered;
@@ -37,8 +37,9 @@ function setNext(response: Response, body: unknown): void {
  * A file never runs in our origin: it is an attachment unless the route vouches for its type, and even then it is
  * sandboxed and not sniffed.
  */
-function sendDownload(response: Response, { download }: Download): void {
+async function sendDownload(response: Response, { download }: Download): Promise<void> {
   const { name, type, inline, body } = download;
+  if (!Buffer.isBuffer(body)) await firstBytes(body);
   response.set({
     'Content-Type': type,
     'Content-Disposition': `${inline ? 'inline' : 'attachment'}; filename*=UTF-8''${encodeURIComponent(name)}`,
@@ -57,4 +58,11 @@ function sendStream(response: Response, body: Readable): void {
   });
   response.on('close', () => body.destroy());
   body.pipe(response);
+}
+
+/** Waits until a stream has something to give or has ended. What fails before is answered as a refusal, not cut off. */
+function firstBytes(body: Readable): Promise<void> {
+  return new Promise((resolve, reject) => {
+    body.once('readable', resolve).once('end', resolve).once('error', reject);
+  });
 }
