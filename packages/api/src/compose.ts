@@ -75,6 +75,7 @@ import { followMembersLater } from './features/subscription/subscription-sync.js
 import { startTrial } from './features/subscription/trial.js';
 import { clockedTime, ClockService, EntriesService } from './features/time/time-public.js';
 import { timeRoutes } from './features/time/time-routes.js';
+import { todayRoutes } from './features/today/today-routes.js';
 import type { ShopScope } from './platform/database/scope.js';
 import type { Access } from './platform/http/mount.js';
 import type { Route } from './platform/http/route.js';
@@ -268,6 +269,7 @@ function createRoutes(services: Services, { sessions }: Platform): Route[] {
     ...invoicesRoutes(services.invoices),
     ...paymentsRoutes(services.invoices),
     ...ledgerRoutes(),
+    ...todayRoutes(),
   ];
 }
 

@@ -124,4 +124,7 @@ export const ROLE_MATRIX: Readonly<Record<string, readonly Role[]>> = {
   'POST /time/entries/:id/clock-out': EVERYONE,
   'POST /time/entries/:id/void': ALL_BUT_CREW,
   'PATCH /time/entries/:id': ALL_BUT_CREW,
+  'GET /today': EVERYONE,
+  'GET /today/counts': EVERYONE,
+  'GET /find': EVERYONE,
 };

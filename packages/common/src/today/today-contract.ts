@@ -3,7 +3,7 @@ import { estimateRowSchema } from '../estimates/estimates-contract.js';
 import { agingBucketsSchema } from '../invoices/aging-contract.js';
 import { invoiceRowSchema, paymentRowSchema } from '../invoices/invoices-contract.js';
 import { jobStageSchema } from '../jobs/jobs-contract.js';
-import { leadRowSchema } from '../leads/leads-contract.js';
+import { leadRowSchema, openLeadStageSchema } from '../leads/leads-contract.js';
 import { clockStateSchema } from '../time/clock-contract.js';
 import { centsSchema, dateSchema, idSchema, instantSchema } from '../wire/fields.js';
 
@@ -45,11 +45,17 @@ export const ownerTodaySchema = z.object({
   on: dateSchema,
   /** Open leads whose next step is today or overdue, the oldest first. */
   leadsToFollowUp: shortListSchema(leadRowSchema),
+  /** Every open stage, in order. */
+  leadsByStage: z.array(z.object({ stage: openLeadStageSchema, count: z.int() })),
   /** Sent and not answered, the oldest first; questions without an answer count before everything. */
   estimatesWaiting: shortListSchema(estimateRowSchema),
+  /** Every stage but closed, in order. */
   jobsByStage: z.array(z.object({ stage: jobStageSchema, count: z.int() })),
+  /** Not closed, the soonest install first. */
+  jobsInHand: shortListSchema(jobInHandSchema),
   overdueInvoices: shortListSchema(invoiceRowSchema),
   overdueCents: centsSchema,
+  aging: agingBucketsSchema,
   /** What is due in the coming 30 days of invoices issued, and what is late already. */
   cashExpectedCents: centsSchema,
   onTheClock: z.array(onTheClockSchema),
@@ -87,6 +93,17 @@ export const crewTodaySchema = z.object({
   clock: clockStateSchema,
 });
 export type CrewToday = z.infer<typeof crewTodaySchema>;
+
+/** What waits for somebody, beside the entries of the navigation; what the one who asks may not read is absent. */
+export const navCountsSchema = z.object({
+  /** Leads whose next step is today or overdue. */
+  leads: z.int().optional(),
+  /** Customers' questions about estimates without an answer. */
+  estimates: z.int().optional(),
+  /** Invoices overdue. */
+  invoices: z.int().optional(),
+});
+export type NavCounts = z.infer<typeof navCountsSchema>;
 
 /** The first page of the one who asks. */
 export const todaySchema = z.discriminatedUnion('role', [

@@ -12,7 +12,7 @@ import { EstimateQuestion } from './estimate-question.entity.js';
 import { EstimateRevision } from './estimate-revision.entity.js';
 import { Estimate } from './estimate.entity.js';
 
-type StoredRow = Omit<EstimateRow, 'status' | 'openQuestions' | 'sentAt' | 'createdAt'> & {
+export type StoredEstimateRow = Omit<EstimateRow, 'status' | 'openQuestions' | 'sentAt' | 'createdAt'> & {
   status: Estimate['status'];
   openUntil: Date | null;
   openQuestions: number | string;
@@ -25,7 +25,18 @@ export async function listEstimates(
   scope: ShopScope,
   request: EstimateListQuery,
 ): Promise<Page<EstimateRow>> {
-  const query = scope
+  const query = estimateRows(scope);
+  if (request.status) whereStatus(query, request.status, scope.now);
+  if (request.customerId) query.where('estimate.customerId = :customerId', request);
+  if (request.leadId) query.where('estimate.leadId = :leadId', request);
+  if (request.q) whereText(query, request.q);
+  const page = await keysetPage<StoredEstimateRow, 'number' | 'title' | 'createdAt'>(query, PAGING, request);
+  return { ...page, rows: page.rows.map((row) => viewEstimateRow(row, scope.now)) };
+}
+
+/** Rows of the alias `estimate` as lists and first pages show them. */
+export function estimateRows(scope: ShopScope): ShopQuery {
+  return scope
     .query(Estimate, 'estimate')
     .join(Customer, 'customer', 'customer.id = estimate.customerId')
     .join(
@@ -40,12 +51,6 @@ export async function listEstimates(
       'question',
       'question.estimateId = estimate.id and question.answer is null',
     );
-  if (request.status) whereStatus(query, request.status, scope.now);
-  if (request.customerId) query.where('estimate.customerId = :customerId', request);
-  if (request.leadId) query.where('estimate.leadId = :leadId', request);
-  if (request.q) whereText(query, request.q);
-  const page = await keysetPage<StoredRow, 'number' | 'title' | 'createdAt'>(query, PAGING, request);
-  return { ...page, rows: page.rows.map((row) => viewRow(row, scope.now)) };
 }
 
 const COLUMNS = {
@@ -83,7 +88,7 @@ function whereText(query: ShopQuery, text: string): void {
   });
 }
 
-function viewRow({ openUntil, ...row }: StoredRow, now: Date): EstimateRow {
+export function viewEstimateRow({ openUntil, ...row }: StoredEstimateRow, now: Date): EstimateRow {
   const expired = row.status === 'sent' && openUntil !== null && openUntil <= now;
   return {
     ...row,

@@ -11,3 +11,4 @@ export { EstimateQuestions } from './estimate-questions.js';
 export { EstimateRevision } from './estimate-revision.entity.js';
 export { estimatesOfLead } from './estimates-of-lead.js';
 export { EstimatesService } from './estimates-service.js';
+export { countOpenQuestions, estimatesWaiting } from './estimates-waiting.js';

@@ -39,6 +39,25 @@ export async function listInvoices(scope: ShopScope, request: InvoiceListQuery):
   return { ...page, rows: page.rows.map((row) => viewRow(row, today)) };
 }
 
+/**
+ * The first invoices at a standing: what is overdue by how late it is, drafts as they were made.
+ * @param today the date in the shop's zone
+ */
+export async function firstInvoices(
+  scope: ShopScope,
+  standing: 'overdue' | 'draft',
+  { today, limit }: { today: string; limit: number },
+): Promise<InvoiceRow[]> {
+  const query = invoicesQuery(scope);
+  narrow(query, { standing }, today);
+  const rows = await query
+    .orderBy(standing === 'overdue' ? 'invoice.dueOrder' : 'invoice.createdAt')
+    .orderBy('invoice.id')
+    .limit(limit)
+    .all<StoredRow>();
+  return rows.map((row) => viewRow(row, today));
+}
+
 function invoicesQuery(scope: ShopScope): ShopQuery {
   return scope
     .query(Invoice, 'invoice')

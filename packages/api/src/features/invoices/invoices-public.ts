@@ -11,5 +11,7 @@ export {
   invoicesPaymentEvents,
   type InvoiceServices,
 } from './invoice-services.js';
+export { firstInvoices } from './invoice-lists.js';
 export { jobInvoices } from './job-invoices.js';
-export { readAging, readTotals } from './receivables.js';
+export { paymentsSince } from './payment-lists.js';
+export { countOverdue, owedUntil, readAging, readTotals } from './receivables.js';

@@ -1,6 +1,7 @@
 import type { PaymentListQuery, PaymentRow } from '@bookmatch/common/invoices/invoices-contract';
 import type { Page } from '@bookmatch/common/wire/list';
 import type { ShopScope } from '../../platform/database/scope.js';
+import type { ShopQuery } from '../../platform/database/shop-query.js';
 import { keysetPage, likePattern } from '../../platform/http/keyset.js';
 import { Customer } from '../customers/customers-public.js';
 import { memberNames } from '../shops/shops-public.js';
@@ -11,7 +12,49 @@ type StoredRow = Omit<PaymentRow, 'createdAt' | 'recordedBy'> & { memberId: stri
 
 /** Every payment of the shop, the last received first. */
 export async function listPayments(scope: ShopScope, request: PaymentListQuery): Promise<Page<PaymentRow>> {
-  const query = scope
+  const query = paymentsQuery(scope);
+  const { q, method, from, to } = request;
+  if (q) query.where('customer.name like :q or payment.reference like :q', { q: likePattern(q) });
+  if (method) query.where('payment.method = :method', { method });
+  if (from) query.where('payment.receivedOn >= :from', { from });
+  if (to) query.where('payment.receivedOn <= :to', { to });
+  const columns = {
+    id: 'payment.id',
+    sorts: { receivedOn: 'payment.receivedOn' },
+    standard: '-receivedOn',
+  } as const;
+  const page = await keysetPage<StoredRow, 'receivedOn'>(query, columns, request);
+  const names = await memberNames(scope);
+  return { ...page, rows: page.rows.map((row) => viewRow(row, names)) };
+}
+
+/**
+ * The last payments since a day, how many there are in all, and what they come to, less what was taken or given back.
+ * @param from `YYYY-MM-DD` in the shop's zone
+ */
+export async function paymentsSince(
+  scope: ShopScope,
+  from: string,
+  limit: number,
+): Promise<{ count: number; rows: PaymentRow[]; cents: number }> {
+  const rows = await paymentsQuery(scope)
+    .pick({ inAll: 'count(*) over ()', centsInAll: 'sum(payment.amountCents) over ()' })
+    .where('payment.receivedOn >= :from', { from })
+    .orderBy('payment.receivedOn', 'DESC')
+    .orderBy('payment.id', 'DESC')
+    .limit(limit)
+    .all<StoredRow & { inAll: number | string; centsInAll: number | string }>();
+  const names = await memberNames(scope);
+  const [first] = rows;
+  return {
+    count: Number(first?.inAll ?? 0),
+    cents: Number(first?.centsInAll ?? 0),
+    rows: rows.map(({ inAll: _inAll, centsInAll: _centsInAll, ...row }) => viewRow(row, names)),
+  };
+}
+
+function paymentsQuery(scope: ShopScope): ShopQuery {
+  return scope
     .query(Payment, 'payment')
     .join(Invoice, 'invoice', 'invoice.id = payment.invoiceId')
     .join(Customer, 'customer', 'customer.id = invoice.customerId')
@@ -33,19 +76,6 @@ export async function listPayments(scope: ShopScope, request: PaymentListQuery):
       invoiceNumber: 'invoice.number',
       customerName: 'customer.name',
     });
-  const { q, method, from, to } = request;
-  if (q) query.where('customer.name like :q or payment.reference like :q', { q: likePattern(q) });
-  if (method) query.where('payment.method = :method', { method });
-  if (from) query.where('payment.receivedOn >= :from', { from });
-  if (to) query.where('payment.receivedOn <= :to', { to });
-  const columns = {
-    id: 'payment.id',
-    sorts: { receivedOn: 'payment.receivedOn' },
-    standard: '-receivedOn',
-  } as const;
-  const page = await keysetPage<StoredRow, 'receivedOn'>(query, columns, request);
-  const names = await memberNames(scope);
-  return { ...page, rows: page.rows.map((row) => viewRow(row, names)) };
 }
 
 function viewRow({ memberId, ...row }: StoredRow, names: ReadonlyMap<string, string>): PaymentRow {

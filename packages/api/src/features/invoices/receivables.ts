@@ -58,6 +58,23 @@ export async function readTotals(
   };
 }
 
+/** What is owed on invoices due until a day, that day included: what should come in by then, what is late with it. */
+export async function owedUntil(scope: ShopScope, day: string): Promise<number> {
+  const sum = await scope
+    .query(Invoice, 'invoice')
+    .pick({ cents: 'coalesce(sum(invoice.balanceCents), 0)' })
+    .where("invoice.status = 'issued' and invoice.dueOrder <= :day", { day })
+    .first<{ cents: number | string }>();
+  return Number(sum?.cents ?? 0);
+}
+
+export function countOverdue(scope: ShopScope, today: string): Promise<number> {
+  return scope
+    .query(Invoice, 'invoice')
+    .where("invoice.status = 'issued' and invoice.dueOrder < :today", { today })
+    .count();
+}
+
 function narrow(query: ShopQuery, customerId: string | undefined, jobId: string | undefined): void {
   if (customerId) query.where('invoice.customerId = :customerId', { customerId });
   if (jobId) query.where('invoice.jobId = :jobId', { jobId });
