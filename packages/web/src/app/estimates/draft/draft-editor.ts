@@ -13,7 +13,6 @@ import {
   roomForm,
   stageForm,
   type DraftForm,
-  type LineForm,
   type RoomForm,
   type StageForm,
 } from './draft-form';
@@ -28,6 +27,14 @@ const NOTHING: RevisionContent = {
   discountCents: 0,
   rooms: [],
   billingSchedule: [],
+};
+
+/** What moving and removing need of a form array, whatever its rows are. */
+type RowList<Row> = {
+  readonly length: number;
+  at(index: number): Row;
+  insert(index: number, row: Row): void;
+  removeAt(index: number, options?: { emitEvent?: boolean }): void;
 };
 
 /** The draft on the desk: its form, what can be done to its rooms, lines and stages, and what it all comes to. */
@@ -132,11 +139,11 @@ export class DraftEditor {
   }
 
   removeLine({ controls: { lines } }: RoomForm, at: number): void {
-    this.removeWithUndo<LineForm>(lines, at, 'Line deleted.');
+    this.removeWithUndo(lines, at, 'Line deleted.');
   }
 
   moveLine(from: RoomForm, at: number, to: RoomForm, place: number): void {
-    move<LineForm>(from.controls.lines, at, to.controls.lines, place);
+    move(from.controls.lines, at, to.controls.lines, place);
   }
 
   /** Past the first or last line, a line is carried on to the end or the beginning of the room beside. */
@@ -160,26 +167,16 @@ export class DraftEditor {
     move(this.schedule, from, this.schedule, to);
   }
 
-  private removeWithUndo<Group extends RoomForm | LineForm | StageForm>(
-    list: FormArray<Group>,
-    at: number,
-    message: string,
-  ): void {
-    const removed = list.controls[at];
-    if (!removed) return;
+  private removeWithUndo<Row>(list: RowList<Row>, at: number, message: string): void {
+    const removed = list.at(at);
     list.removeAt(at);
     this.notices.offer(message, 'Undo', () => list.insert(Math.min(at, list.length), removed));
   }
 }
 
-function move<Group extends RoomForm | LineForm | StageForm>(
-  from: FormArray<Group>,
-  at: number,
-  to: FormArray<Group>,
-  place: number,
-): void {
-  const moved = from.controls[at];
-  if (!moved || place < 0 || place > to.length - (from === to ? 1 : 0)) return;
+function move<Row>(from: RowList<Row>, at: number, to: RowList<Row>, place: number): void {
+  if (place < 0 || place > to.length - (from === to ? 1 : 0)) return;
+  const moved = from.at(at);
   from.removeAt(at, { emitEvent: from !== to });
   to.insert(place, moved);
 }
