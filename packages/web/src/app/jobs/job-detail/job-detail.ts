@@ -22,7 +22,6 @@ import {
 } from '@bookmatch/common/jobs/jobs-contract';
 import { Store } from '@ngrx/store';
 import { injectCan } from '../../platform/session/ability';
-import { CurrentShop } from '../../platform/session/current-shop';
 import { DateTextPipe } from '../../ui/formats/date-text.pipe';
 import { moneyText } from '../../ui/formats/money-text';
 import { SHOP_CURRENCY } from '../../ui/formats/shop-settings';
@@ -39,7 +38,7 @@ import { DetailsForm } from '../details-form/details-form';
 import { JobCosts } from '../job-costs/job-costs';
 import { JobCrew } from '../job-crew/job-crew';
 import { JobFiles } from '../job-files/job-files';
-import { actualName, costLeaves, hourLeaves, paceNote } from '../job-leaves';
+import { actualName, billingLeaves, costLeaves, hourLeaves, paceNote } from '../job-leaves';
 import { JobMoney } from '../job-money/job-money';
 import { JobPlace } from '../job-place/job-place';
 import { nextStep, type NextStep } from '../next-step';
@@ -84,7 +83,6 @@ export class JobDetail {
   private readonly router = inject(Router);
   private readonly dialog = inject(MatDialog);
   private readonly moves = inject(StageMoves);
-  private readonly shop = inject(CurrentShop);
   private readonly currency = inject(SHOP_CURRENCY);
   protected readonly can = injectCan();
   protected readonly stages = JOB_STAGES.map((key) => ({ key, name: JOB_STAGE_NAMES[key] }));
@@ -99,14 +97,14 @@ export class JobDetail {
   private readonly dateText = inject(DateTextPipe);
   protected readonly facts = computed(() => this.factsOf(this.job()));
 
-  protected readonly movable = computed(() => this.can('update', 'Job') && !this.shop.readOnly());
+  protected readonly movable = computed(() => this.can('update', 'Job'));
   protected readonly reachable = computed(() => {
     const job = this.job();
     return job && this.movable() ? JOB_TRANSITIONS[job.stage] : [];
   });
   protected readonly step = computed(() => {
     const job = this.job();
-    const bill = this.can('create', 'Invoice') && !this.shop.readOnly();
+    const bill = this.can('create', 'Invoice');
     return job ? nextStep(job, { bill, move: this.movable() }) : null;
   });
   protected readonly costPair = computed(() => {
@@ -118,6 +116,11 @@ export class JobDetail {
       actual: actualName(job.money, closed),
       pace: paceNote(job.money, closed, this.whole),
     };
+  });
+  protected readonly billingRows = computed(() => {
+    const money = this.job()?.money;
+    const rows = money ? billingLeaves(money) : [];
+    return rows.length > 0 ? rows : null;
   });
   protected readonly hourRows = computed(() => {
     const job = this.job();

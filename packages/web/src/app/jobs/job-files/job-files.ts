@@ -15,7 +15,6 @@ import { MatProgressBar } from '@angular/material/progress-bar';
 import type { JobFile } from '@bookmatch/common/jobs/job-files-contract';
 import { Store } from '@ngrx/store';
 import { injectCan } from '../../platform/session/ability';
-import { CurrentShop } from '../../platform/session/current-shop';
 import { Confirm } from '../../ui/confirm/confirm';
 import { DateTextPipe } from '../../ui/formats/date-text.pipe';
 import { Panel } from '../../ui/panel/panel';
@@ -49,13 +48,12 @@ export class JobFiles {
   private readonly api = inject(JobsApiClient);
   private readonly dialog = inject(MatDialog);
   private readonly confirm = inject(Confirm);
-  private readonly shop = inject(CurrentShop);
   private readonly queue = inject(UploadQueue);
   protected readonly can = injectCan();
   protected readonly files = this.store.selectSignal(selectFiles);
   protected readonly uploads = this.queue.uploads;
   protected readonly draggedOver = signal(false);
-  protected readonly mayAdd = computed(() => this.can('create', 'JobFile') && !this.shop.readOnly());
+  protected readonly mayAdd = computed(() => this.can('create', 'JobFile'));
   protected readonly accepted = ACCEPTED_FILES;
   protected readonly kindName = fileKindName;
   protected readonly sizeOf = fileSize;
@@ -111,7 +109,13 @@ export class JobFiles {
       photos: photos.map(({ file, contentUrl }) => ({ name: file.name, url: contentUrl })),
       at: photos.findIndex(({ file }) => file.id === fileId),
     };
-    this.dialog.open(PhotoView, { data, maxWidth: '100vw', width: '100vw', height: '100dvh' });
+    this.dialog.open(PhotoView, {
+      data,
+      ariaLabel: 'Photos of the job',
+      maxWidth: '100vw',
+      width: '100vw',
+      height: '100dvh',
+    });
   }
 
   protected remove({ id, name }: JobFile): void {

@@ -8,17 +8,15 @@ import { injectCan } from '../../platform/session/ability';
 import { MoneyPipe } from '../../ui/formats/money.pipe';
 import { moneyText } from '../../ui/formats/money-text';
 import { SHOP_CURRENCY } from '../../ui/formats/shop-settings';
-import { LeafPair } from '../../ui/leaf-pair/leaf-pair';
 import { Panel } from '../../ui/panel/panel';
 import { StatusChip } from '../../ui/status-chip/status-chip';
 import { Working, type WorkingLine } from '../../ui/working/working';
 import { invoiceChip } from '../invoice-chip';
-import { billingLeaves } from '../job-leaves';
 
 /** What was agreed, billed, paid and earned: the schedule beside its invoices, and the working of each figure. */
 @Component({
   selector: 'bm-job-money',
-  imports: [LeafPair, MatButton, MoneyPipe, Panel, RouterLink, StatusChip, Working],
+  imports: [MatButton, MoneyPipe, Panel, RouterLink, StatusChip, Working],
   templateUrl: './job-money.html',
   styleUrl: './job-money.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -33,9 +31,8 @@ export class JobMoney {
   private readonly currency = inject(SHOP_CURRENCY);
   protected readonly can = injectCan();
   protected readonly whole = (cents: number): string => moneyText(cents, this.currency(), 'whole');
-  protected readonly leaves = computed(() => billingLeaves(this.money()));
   protected readonly rows = computed(() =>
-    this.money().billing.map((row) => ({ ...row, chip: invoiceChip(row), share: shareText(row) })),
+    this.money().billing.map((row) => ({ ...row, chip: invoiceChip(row), percent: shareText(row) })),
   );
   protected readonly open = computed(() => this.money().billedCents - this.money().paidCents);
 

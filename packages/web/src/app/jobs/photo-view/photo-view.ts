@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { MatIconButton } from '@angular/material/button';
-import { MAT_DIALOG_DATA, MatDialogClose, MatDialogTitle } from '@angular/material/dialog';
+import { MAT_DIALOG_DATA, MatDialogClose } from '@angular/material/dialog';
 import { MatIcon } from '@angular/material/icon';
 
 export type PhotoViewSubject = {
@@ -12,7 +12,7 @@ export type PhotoViewSubject = {
 /** Photos one at a time over the whole screen; arrow keys and buttons go on, Escape closes. */
 @Component({
   selector: 'bm-photo-view',
-  imports: [MatDialogClose, MatDialogTitle, MatIcon, MatIconButton],
+  imports: [MatDialogClose, MatIcon, MatIconButton],
   templateUrl: './photo-view.html',
   styleUrl: './photo-view.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,4 +1,13 @@
-import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import {
+  afterRenderEffect,
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  ElementRef,
+  inject,
+  input,
+  output,
+} from '@angular/core';
 import { MatIcon } from '@angular/material/icon';
 
 export type Stage = { key: string; name: string };
@@ -35,6 +44,19 @@ export class StageTrack {
   /** The stages that may be moved to from here; the others are only shown. */
   readonly reachable = input<readonly string[]>([]);
   readonly picked = output<string>();
+
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
+
+  constructor() {
+    // On a narrow screen the track scrolls sideways: the present stage is the one to see first.
+    afterRenderEffect(() => {
+      this.current();
+      const present = this.host.querySelector<HTMLElement>('[aria-current]');
+      if (present)
+        this.host.scrollLeft +=
+          present.getBoundingClientRect().left - this.host.getBoundingClientRect().left - 16;
+    });
+  }
 
   protected readonly steps = computed(() => {
     const at = this.stages().findIndex(({ key }) => key === this.current());
