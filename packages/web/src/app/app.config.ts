@@ -24,6 +24,8 @@ import { PageTitle } from './platform/page/page-title';
 import { shopSlugOf } from './platform/session/address';
 import { CurrentShop } from './platform/session/current-shop';
 import { provideSession } from './platform/session/session.providers';
+import { BANNER_SLOT } from './shell/slots';
+import { subscriptionBanner } from './subscription/subscription-public';
 import { registerIcons } from './ui/icons/register-icons';
 import { SHOP_CURRENCY, SHOP_UNITS, SHOP_ZONE } from './ui/formats/shop-settings';
 
@@ -49,6 +51,7 @@ export const appConfig: ApplicationConfig = {
     provideAppInitializer(registerIcons),
     { provide: TitleStrategy, useExisting: PageTitle },
     { provide: MAT_FORM_FIELD_DEFAULT_OPTIONS, useValue: formFields },
+    { provide: BANNER_SLOT, useValue: subscriptionBanner },
     { provide: SESSION_RENEWAL, useFactory: sessionRenewal },
     { provide: SHOP_CURRENCY, useFactory: () => inject(CurrentShop).currency },
     { provide: SHOP_ZONE, useFactory: () => inject(CurrentShop).timeZone },

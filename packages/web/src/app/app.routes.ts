@@ -46,14 +46,14 @@ export const shopRoutes: Routes = [
         loadChildren: () => import('./ledger/ledger.routes'),
       },
       {
+        path: 'settings/subscription',
+        canMatch: [canMatchAbility('read', 'Subscription')],
+        loadChildren: () => import('./subscription/subscription.routes'),
+      },
+      {
         path: 'settings',
         canMatch: [canMatchAbility('read', 'Shop')],
         loadChildren: () => import('./shops/shops.routes'),
-      },
-      {
-        path: 'subscription',
-        canMatch: [canMatchAbility('read', 'Subscription')],
-        loadChildren: () => import('./subscription/subscription.routes'),
       },
       { path: 'account', loadChildren: () => import('./accounts/own-account.routes') },
       {

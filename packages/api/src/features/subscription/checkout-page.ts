@@ -25,7 +25,7 @@ export class CheckoutPage {
     const customer = row.providerCustomerId ?? (await this.openCustomer(scope, stamp));
     const members = await countMembers(scope);
     const { slug } = await scope.global(Shop).get(shopId);
-    const screen = `${origin}/s/${slug}/subscription`;
+    const screen = `${origin}/s/${slug}/settings/subscription`;
     const session = await payments.checkout.sessions.create(
       {
         mode: 'subscription',

@@ -41,7 +41,7 @@ export class SubscriptionMail {
     shop: Shop,
     write: (about: { email: string; name: string; shopName: string; url: string }) => Letter,
   ): Promise<void> {
-    const url = `${this.origin}/s/${shop.slug}/subscription`;
+    const url = `${this.origin}/s/${shop.slug}/settings/subscription`;
     for (const { email, name } of await ownersOf(scope))
       await sendMail(scope, write({ email, name, shopName: shop.name, url }));
   }

@@ -58,7 +58,7 @@ export class SubscriptionService {
     const { slug } = await scope.global(Shop).get(scope.shopId);
     const { url } = await this.parts.payments.billingPortal.sessions.create({
       customer: providerCustomerId,
-      return_url: `${this.parts.origin}/s/${slug}/subscription?from=provider`,
+      return_url: `${this.parts.origin}/s/${slug}/settings/subscription?from=provider`,
     });
     return { url };
   }

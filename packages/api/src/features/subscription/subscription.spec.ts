@@ -123,7 +123,7 @@ describe("the shop's own subscription", () => {
       await shop.join('crew');
       await shop.join('bookkeeper');
       const back = await subscribe();
-      expect(back).toBe(`${api.platform.config.origin}/s/${shop.slug}/subscription?from=provider`);
+      expect(back).toBe(`${api.platform.config.origin}/s/${shop.slug}/settings/subscription?from=provider`);
       expect(await read()).toMatchObject({ status: 'trialing', members: 3, monthlyTotalCents: 8_700 });
       expect(await atProvider()).toMatchObject({ status: 'trialing', items: { data: [{ quantity: 3 }] } });
       await provider.forward(15);

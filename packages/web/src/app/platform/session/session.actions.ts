@@ -9,6 +9,8 @@ export const SessionPage = createActionGroup({
     signedIn: emptyProps(),
     signOutPressed: props<{ everywhere: boolean }>(),
     nameChanged: props<{ name: string }>(),
+    /** What the session says of the shop (its name, its zone, how it stands) is no longer so: read it again. */
+    shopChanged: emptyProps(),
   },
 });
 

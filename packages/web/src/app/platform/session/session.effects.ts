@@ -11,7 +11,7 @@ import { SessionApi, SessionPage } from './session.actions';
 export const loadSession = createEffect(
   (actions$ = inject(Actions), api = inject(SessionApiClient)) =>
     actions$.pipe(
-      ofType(SessionPage.started, SessionPage.signedIn),
+      ofType(SessionPage.started, SessionPage.signedIn, SessionPage.shopChanged),
       switchMap(() =>
         api.read().pipe(
           map((session) => SessionApi.loaded({ session })),
