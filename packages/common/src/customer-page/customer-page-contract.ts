@@ -67,6 +67,8 @@ export const customerInvoiceSchema = z.object({
   creditedCents: centsSchema,
   paidCents: centsSchema,
   balanceCents: centsSchema,
+  /** What the customer paid beyond the debt, and has not got back yet. */
+  heldCents: centsSchema,
   memo: z.string(),
   /** The shop takes cards and something is owed. */
   canPayByCard: z.boolean(),

@@ -150,6 +150,11 @@ describe('card payments', () => {
     expect(seen).toMatchObject({ paidCents: 10_000, balanceCents: 0, overpaidCents: 6000 });
     expect(seen.payments[1]).toMatchObject({ amountCents: 10_000, appliedCents: 4000 });
     expect(await apart.balances()).toEqual({ '1000': 6000, '1050': 10_000, '2350': 6000, '4000': 10_000 });
+    expect(await page.read()).toMatchObject({
+      balanceCents: 0,
+      heldCents: 6000,
+      payments: [{ amountCents: 6000 }, { amountCents: 4000 }],
+    });
     const refund = (amountCents: number, version: number) =>
       apart.client.post(
         `/invoices/${seen.id}/refunds`,

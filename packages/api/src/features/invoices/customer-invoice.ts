@@ -28,13 +28,19 @@ export async function customerInvoice(scope: ShopScope, id: string): Promise<Cus
     currency: frame.currency,
     ...invoiceStanding(status, paidCents, dueOn, todayAt(shop, scope.now)),
     lines,
+    heldCents: invoice.overpaidCents,
     payments: shownPayments(payments),
     canPayByCard: status === 'issued' && shop.cardPayments === 'ready' && cardTakes(balanceCents),
   };
 }
 
-/** A payment that was recorded wrongly and taken back is the shop's own matter: the customer sees neither. */
-function shownPayments(payments: readonly Payment[]): Payment[] {
+/**
+ * What paid the invoice, so that it adds up to the balance. A payment that was recorded wrongly and taken back is the
+ * shop's own matter, and what came beyond the debt is said apart.
+ */
+function shownPayments(payments: readonly Payment[]): CustomerInvoice['payments'] {
   const reversed = new Set(payments.map(({ reversesId }) => reversesId));
-  return payments.filter(({ id, kind }) => kind !== 'reversal' && !reversed.has(id));
+  return payments
+    .filter(({ id, kind, appliedCents }) => kind === 'payment' && !reversed.has(id) && appliedCents > 0)
+    .map(({ receivedOn, method, appliedCents }) => ({ receivedOn, method, amountCents: appliedCents }));
 }
