@@ -94,17 +94,6 @@ export const crewTodaySchema = z.object({
 });
 export type CrewToday = z.infer<typeof crewTodaySchema>;
 
-/** What waits for somebody, beside the entries of the navigation; what the one who asks may not read is absent. */
-export const navCountsSchema = z.object({
-  /** Leads whose next step is today or overdue. */
-  leads: z.int().optional(),
-  /** Customers' questions about estimates without an answer. */
-  estimates: z.int().optional(),
-  /** Invoices overdue. */
-  invoices: z.int().optional(),
-});
-export type NavCounts = z.infer<typeof navCountsSchema>;
-
 /** The first page of the one who asks. */
 export const todaySchema = z.discriminatedUnion('role', [
   ownerTodaySchema,

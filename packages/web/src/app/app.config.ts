@@ -2,6 +2,7 @@ import {
   inject,
   provideAppInitializer,
   provideBrowserGlobalErrorListeners,
+  provideEnvironmentInitializer,
   type ApplicationConfig,
 } from '@angular/core';
 import {
@@ -26,6 +27,7 @@ import { CurrentShop } from './platform/session/current-shop';
 import { provideSession } from './platform/session/session.providers';
 import { BANNER_SLOT } from './shell/slots';
 import { subscriptionBanner } from './subscription/subscription-public';
+import { keepNavCounts } from './today/today-public';
 import { registerIcons } from './ui/icons/register-icons';
 import { SHOP_CURRENCY, SHOP_UNITS, SHOP_ZONE } from './ui/formats/shop-settings';
 
@@ -49,6 +51,7 @@ export const appConfig: ApplicationConfig = {
     provideApi(),
     provideSession(),
     provideAppInitializer(registerIcons),
+    provideEnvironmentInitializer(keepNavCounts),
     { provide: TitleStrategy, useExisting: PageTitle },
     { provide: MAT_FORM_FIELD_DEFAULT_OPTIONS, useValue: formFields },
     { provide: BANNER_SLOT, useValue: subscriptionBanner },

@@ -1,4 +1,4 @@
-import type { NavCounts } from '@bookmatch/common/today/today-contract';
+import type { NavCounts } from '@bookmatch/common/today/nav-counts-contract';
 import type { ShopScope } from '../../platform/database/scope.js';
 import { countOpenQuestions } from '../estimates/estimates-public.js';
 import { countOverdue } from '../invoices/invoices-public.js';

@@ -1,5 +1,6 @@
+import { navCountsSchema } from '@bookmatch/common/today/nav-counts-contract';
 import { quickFindQuerySchema, quickFindSchema } from '@bookmatch/common/today/quick-find-contract';
-import { navCountsSchema, todaySchema } from '@bookmatch/common/today/today-contract';
+import { todaySchema } from '@bookmatch/common/today/today-contract';
 import { shopRoute, type Route } from '../../platform/http/route.js';
 import { navCounts } from './nav-counts.js';
 import { quickFind } from './quick-find.js';

@@ -1,8 +1,8 @@
+import type { NavCounts } from '@bookmatch/common/today/nav-counts-contract';
 import type {
   BookkeeperToday,
   CrewToday,
   LeadHandToday,
-  NavCounts,
   OwnerToday,
 } from '@bookmatch/common/today/today-contract';
 import type { Invoice } from '@bookmatch/common/invoices/invoices-contract';

@@ -74,6 +74,31 @@ describe('QuickFind', () => {
     expect(go).toHaveBeenCalledWith(`/jobs/${found[1]?.id}`);
   });
 
+  it('opens nothing that was found for an earlier text', async () => {
+    const { type, answer, press, input, dialog } = await open();
+    await type('quarry');
+    await answer(found);
+    input.value = 'mudroom';
+    input.dispatchEvent(new Event('input'));
+    await press('Enter');
+    expect(dialog.close).not.toHaveBeenCalled();
+  });
+
+  it('says what can be typed, and offers another try when finding fails', async () => {
+    const { type, element, http, shop, fixture } = await open();
+    expect(element.querySelector('[role=status]')?.textContent).toContain('Type a name');
+    await type('quarry');
+    const asked = () => http.expectOne((request) => request.url === shop('/find'));
+    asked().flush('', { status: 500, statusText: '' });
+    await fixture.whenStable();
+    expect(element.textContent).toContain('Finding does not work right now.');
+    element.querySelector<HTMLButtonElement>('[role=status] button')?.click();
+    fixture.detectChanges();
+    asked().flush({ rows: found });
+    await fixture.whenStable();
+    expect(element.querySelectorAll('[role=option]')).toHaveLength(2);
+  });
+
   it('says when there is nothing, and asks nothing for an empty field', async () => {
     const { type, answer, element, http, shop } = await open();
     await type('zzz');

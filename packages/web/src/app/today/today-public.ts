@@ -1,0 +1,2 @@
+/** What `app.config.ts` may use of `today`. */
+export { keepNavCounts } from './keep-nav-counts';
