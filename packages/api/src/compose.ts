@@ -73,7 +73,7 @@ import {
 } from './features/subscription/subscription-services.js';
 import { followMembersLater } from './features/subscription/subscription-sync.js';
 import { startTrial } from './features/subscription/trial.js';
-import { clockedTime, ClockService, EntriesService } from './features/time/time-public.js';
+import { clockedTime, clockOutLeaver, ClockService, EntriesService } from './features/time/time-public.js';
 import { timeRoutes } from './features/time/time-routes.js';
 import { todayRoutes } from './features/today/today-routes.js';
 import type { ShopScope } from './platform/database/scope.js';
@@ -184,7 +184,11 @@ function createServices(platform: Platform): Services {
   return {
     accounts,
     passwords: new PasswordsService(config.origin),
-    ...createShopServices(platform, { membersChanged: followMembersLater, refuseLapsed }),
+    ...createShopServices(platform, {
+      membersChanged: followMembersLater,
+      memberLeaves: clockOutLeaver,
+      refuseLapsed,
+    }),
     ...createSubscriptionServices(platform),
     ...createSalesServices(platform),
     operations: new OperationsService(),

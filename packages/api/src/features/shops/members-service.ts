@@ -10,6 +10,8 @@ import { Member } from './member.entity.js';
 export type MemberHooks = {
   /** There are more or fewer members than before. Runs in the transaction that changed it. */
   membersChanged(scope: ShopScope): Promise<void>;
+  /** A member is leaving. Runs in the transaction that removes them. */
+  memberLeaves(scope: ShopScope, memberId: string): Promise<void>;
 };
 
 /** Who belongs to the shop, and as what. Their rights are read at every request, so a change holds from the next one on. */
@@ -44,6 +46,7 @@ export class MembersService {
   async remove(scope: ShopScope, id: string, version: number): Promise<void> {
     const member = await this.lock(scope, id);
     if (member.role === 'owner') await this.refuseIfLastOwner(scope, id, null);
+    await this.hooks.memberLeaves(scope, id);
     await scope.rows(Member).update(member, { removedAt: scope.now }, version);
     await this.hooks.membersChanged(scope);
   }

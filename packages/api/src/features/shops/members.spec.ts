@@ -1,4 +1,5 @@
 import type { Client } from '../../../test/harness/client.js';
+import { ClockSteps } from '../../../test/harness/clock-steps.js';
 import { TestApi, type TestShop } from '../../../test/harness/test-api.js';
 
 type Listed = { id: string; version: number; role: string; laborCostCentsPerHour?: number | null };
@@ -74,6 +75,33 @@ describe('members', () => {
     expect((await shop.owner.delete(`/members/${memberId}`, 2)).status).toBe(404);
     expect((await shop.owner.patch(`/members/${memberId}/role`, { role: 'owner' }, 2)).status).toBe(404);
     await api.signIn(email);
+  });
+
+  it('are clocked out in the minute they are removed, and their time stays', async () => {
+    const steps = await ClockSteps.of(shop);
+    const { client, memberId } = await shop.join('crew');
+    const jobId = await steps.job({ 'Face frames': 600 }, { openToCrew: true });
+    const { entry } = await steps.clockIn(client, steps.punch(jobId, api.clock.read().toISOString()));
+    api.clock.forward({ minutes: 95 });
+    await shop.owner.delete(`/members/${memberId}`, 1);
+    const rows: { minutes: number; voided_at: Date | null }[] = await api.platform.dataSource.query(
+      'select minutes, voided_at from time_entry where id = ?',
+      [entry.id],
+    );
+    expect(rows).toEqual([{ minutes: 95, voided_at: null }]);
+  });
+
+  it('leave an entry that was forgotten for days no longer than one may last', async () => {
+    const steps = await ClockSteps.of(shop);
+    const { client, memberId } = await shop.join('crew');
+    await steps.clockIn(client, steps.punch(null, api.clock.read().toISOString()));
+    api.clock.forward({ days: 3 });
+    await shop.owner.delete(`/members/${memberId}`, 1);
+    const rows: { minutes: number }[] = await api.platform.dataSource.query(
+      'select minutes from time_entry where member_id = ?',
+      [memberId],
+    );
+    expect(rows).toEqual([{ minutes: 16 * 60 }]);
   });
 
   it('of two changes of one version keep the first', async () => {

@@ -1,4 +1,5 @@
 /** What other slices may use of `time`. */
+export { clockOutLeaver } from './clock-out-leaver.js';
 export { ClockService } from './clock-service.js';
 export { clockStateOf } from './clock-state.js';
 export { clockedTime } from './clocked-time.js';
