@@ -3,7 +3,7 @@ import { inject } from '@angular/core';
 import { Router } from '@angular/router';
 import type { Invoice } from '@bookmatch/common/invoices/invoices-contract';
 import { Actions, createEffect, ofType } from '@ngrx/effects';
-import { concatMap, exhaustMap, filter, map, of, switchMap, tap, type Observable } from 'rxjs';
+import { concat, exhaustMap, filter, map, of, switchMap, tap, type Observable } from 'rxjs';
 import { catchProblem } from '../../platform/api/catch-problem';
 import { isStale } from '../../platform/api/problem-kinds';
 import { NavCounts } from '../../platform/page/nav-counts';
@@ -179,11 +179,12 @@ export const issueAndSend = createEffect(
       ofType(InvoicesPage.issueAndSendSubmitted),
       exhaustMap(({ invoice, letter }) =>
         api.issue(invoice).pipe(
-          concatMap((issued) => [
-            of(InvoicesApi.issuedFirst({ invoice: issued })),
-            api.send(issued, letter).pipe(answered('Invoice issued and sent.')),
-          ]),
-          concatMap((step) => step),
+          switchMap((issued) =>
+            concat(
+              of(InvoicesApi.issuedFirst({ invoice: issued })),
+              api.send(issued, letter).pipe(answered('Invoice issued and sent.')),
+            ),
+          ),
           catchProblem((problem) => InvoicesApi.saveFailed({ problem })),
         ),
       ),
