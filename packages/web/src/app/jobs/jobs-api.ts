@@ -1,10 +1,4 @@
 import { inject, Injectable } from '@angular/core';
-import {
-  customerPageSchema,
-  customerWithSitesSchema,
-  type CustomerRow,
-  type Site,
-} from '@bookmatch/common/customers/customers-contract';
 import { invoiceSchema, type Invoice } from '@bookmatch/common/invoices/invoices-contract';
 import {
   jobCostSchema,
@@ -122,16 +116,5 @@ export class JobsApiClient {
     return this.api
       .get(this.shopUrl('/operations'), { answer: operationsSchema })
       .pipe(map(({ rows }) => rows));
-  }
-
-  findCustomers(q: string): Observable<CustomerRow[]> {
-    const query = { q, limit: 20 };
-    return this.api
-      .get(this.shopUrl('/customers'), { answer: customerPageSchema, query })
-      .pipe(map(({ rows }) => rows));
-  }
-
-  customer(id: string): Observable<{ id: string; name: string; sites: Site[] }> {
-    return this.api.get(this.shopUrl(`/customers/${id}`), { answer: customerWithSitesSchema });
   }
 }

@@ -37,7 +37,7 @@ type Shown = { id: string; name: string };
     <mat-form-field>
       <mat-label>Customer</mat-label>
       <input matInput autocomplete="off" required [formControl]="typed" [matAutocomplete]="customers" />
-      <mat-autocomplete #customers requireSelection [displayWith]="nameOf" (optionSelected)="pick($event)">
+      <mat-autocomplete #customers [displayWith]="nameOf" (optionSelected)="pick($event)">
         @for (row of found(); track row.id) {
           <mat-option [value]="row">
             {{ row.name }} <span class="bm-quiet">{{ row.company || row.city }}</span>

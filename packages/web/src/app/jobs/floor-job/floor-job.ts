@@ -13,6 +13,7 @@ import { RouterLink } from '@angular/router';
 import { formatHours } from '@bookmatch/common/calendar/format';
 import { JOB_STAGE_NAMES } from '@bookmatch/common/jobs/job-stages';
 import { Store } from '@ngrx/store';
+import { addressLines } from '../../customers/customers-public';
 import { DateTextPipe } from '../../ui/formats/date-text.pipe';
 import { LeafPair } from '../../ui/leaf-pair/leaf-pair';
 import { PageHead } from '../../ui/page-head/page-head';
@@ -22,7 +23,6 @@ import { Skeleton } from '../../ui/skeleton/skeleton';
 import { StatusChip } from '../../ui/status-chip/status-chip';
 import { JobFiles } from '../job-files/job-files';
 import { hourLeaves } from '../job-leaves';
-import { addressLines } from '../job-place/job-place';
 import { JobsPage } from '../state/jobs.actions';
 import { selectJob, selectOpenProblem } from '../state/jobs.selectors';
 

@@ -1,25 +1,15 @@
 import {
   ChangeDetectionStrategy,
   Component,
-  DestroyRef,
   inject,
   input,
   effect,
   signal,
   untracked,
+  viewChild,
 } from '@angular/core';
-import { takeUntilDestroyed, toSignal } from '@angular/core/rxjs-interop';
-import {
-  FormControl,
-  NonNullableFormBuilder,
-  ReactiveFormsModule,
-  type AbstractControl,
-} from '@angular/forms';
-import {
-  MatAutocomplete,
-  MatAutocompleteTrigger,
-  type MatAutocompleteSelectedEvent,
-} from '@angular/material/autocomplete';
+import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
+import { NonNullableFormBuilder, ReactiveFormsModule, type AbstractControl } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatCheckbox } from '@angular/material/checkbox';
 import {
@@ -33,12 +23,13 @@ import {
 import { MatInput } from '@angular/material/input';
 import { MatOption, MatSelect } from '@angular/material/select';
 import { RouterLink } from '@angular/router';
-import type { CustomerRow, Site } from '@bookmatch/common/customers/customers-contract';
+import type { CustomerWithSites, Site } from '@bookmatch/common/customers/customers-contract';
 import { COST_CATEGORIES, COST_CATEGORY_NAMES } from '@bookmatch/common/estimates/cost-categories';
 import { createJobSchema } from '@bookmatch/common/jobs/jobs-contract';
 import type { Operation } from '@bookmatch/common/shops/operations-contract';
 import { Store } from '@ngrx/store';
-import { catchError, debounceTime, filter, of, switchMap } from 'rxjs';
+import { catchError, of } from 'rxjs';
+import { CustomerChoice } from '../../customers/customers-public';
 import { placeFieldProblems } from '../../ui/form-errors/field-problems';
 import { ErrorOf } from '../../ui/form-errors/error-of';
 import { focusFirstInvalid, FormErrors } from '../../ui/form-errors/form-errors';
@@ -52,17 +43,14 @@ import { JobsPage } from '../state/jobs.actions';
 import { selectSave } from '../state/jobs.selectors';
 import { isHours, jobBody, jobFormGroup, plannable } from './job-form-group';
 
-type Chosen = { id: string; name: string };
-
 /** Takes on a job without an estimate: repeat work whose price and plan are known. */
 @Component({
   selector: 'bm-job-form',
   imports: [
+    CustomerChoice,
     DayInput,
     ErrorOf,
     FormErrors,
-    MatAutocomplete,
-    MatAutocompleteTrigger,
     MatButton,
     MatCheckbox,
     MatError,
@@ -89,24 +77,12 @@ export class JobForm implements HasUnsavedChanges {
 
   private readonly store = inject(Store);
   private readonly api = inject(JobsApiClient);
-  private readonly destroyed = inject(DestroyRef);
   private readonly builder = inject(NonNullableFormBuilder);
   protected readonly form = jobFormGroup(this.builder);
   protected readonly save = this.store.selectSignal(selectSave);
   protected readonly categories = COST_CATEGORIES.map((key) => ({ key, name: COST_CATEGORY_NAMES[key] }));
 
-  /** What stands in the customer's field: a text while it is searched, the customer once chosen. */
-  protected readonly customer = new FormControl<string | Chosen>('', { nonNullable: true });
-  protected readonly nameOf = (customer: string | Chosen): string =>
-    typeof customer === 'string' ? customer : customer.name;
-  protected readonly found = toSignal(
-    this.customer.valueChanges.pipe(
-      filter((value) => typeof value === 'string'),
-      debounceTime(250),
-      switchMap((q) => this.api.findCustomers(q).pipe(catchError(() => of<CustomerRow[]>([])))),
-    ),
-    { initialValue: [] },
-  );
+  private readonly customerChoice = viewChild.required(CustomerChoice);
   protected readonly sites = signal<readonly Site[]>([]);
   protected readonly operations = signal<readonly Operation[]>([]);
 
@@ -115,10 +91,7 @@ export class JobForm implements HasUnsavedChanges {
     warnBeforeUnload(() => this.hasUnsavedChanges());
     effect(() => {
       const id = this.customerId();
-      if (id) untracked(() => this.take(id));
-    });
-    this.customer.valueChanges.pipe(takeUntilDestroyed()).subscribe((value) => {
-      if (typeof value === 'string') this.form.patchValue({ customerId: '', siteId: null });
+      if (id) untracked(() => this.form.controls.customerId.setValue(id));
     });
     this.api
       .operations()
@@ -133,8 +106,9 @@ export class JobForm implements HasUnsavedChanges {
     return this.form.dirty && this.save().status !== 'saved';
   }
 
-  protected choose({ option }: MatAutocompleteSelectedEvent): void {
-    this.take((option.value as Chosen).id);
+  protected offerSites(customer: CustomerWithSites | null): void {
+    this.sites.set(customer?.sites ?? []);
+    this.form.patchValue({ siteId: customer?.sites[0]?.id ?? null });
   }
 
   protected hoursOf(operationId: string): AbstractControl {
@@ -144,36 +118,18 @@ export class JobForm implements HasUnsavedChanges {
   protected submit(element: HTMLFormElement): void {
     this.form.updateValueAndValidity();
     this.form.markAllAsTouched();
-    this.customer.markAsTouched();
+    this.customerChoice().touch();
     const parsed = createJobSchema.safeParse(jobBody(this.form.getRawValue()));
     if (!parsed.success)
       placeFieldProblems(
         this.form,
         parsed.error.issues.map(({ path, message }) => ({ path: path.map(String).join('.'), message })),
       );
-    if (this.form.controls.customerId.value === '')
-      this.customer.setErrors({ problem: 'Choose a customer from the list.' });
-    if (!parsed.success || !this.form.valid || this.customer.invalid) {
+    if (!parsed.success || !this.form.valid) {
       focusFirstInvalid(element);
       return;
     }
     this.store.dispatch(JobsPage.createSubmitted({ fields: parsed.data }));
-  }
-
-  private take(id: string): void {
-    this.api
-      .customer(id)
-      .pipe(
-        takeUntilDestroyed(this.destroyed),
-        catchError(() => of(null)),
-      )
-      .subscribe((customer) => {
-        if (!customer) return;
-        this.customer.setValue({ id: customer.id, name: customer.name });
-        this.form.patchValue({ customerId: customer.id, siteId: customer.sites[0]?.id ?? null });
-        this.form.markAsDirty();
-        this.sites.set(customer.sites);
-      });
   }
 
   private offer(operations: readonly Operation[]): void {

@@ -1,8 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
-import type { Address } from '@bookmatch/common/customers/customers-contract';
 import { JOB_STAGE_NAMES } from '@bookmatch/common/jobs/job-stages';
 import type { Job } from '@bookmatch/common/jobs/jobs-contract';
+import { addressLines } from '../../customers/customers-public';
 import { injectCan } from '../../platform/session/ability';
 import { DateTextPipe } from '../../ui/formats/date-text.pipe';
 import { Panel } from '../../ui/panel/panel';
@@ -37,10 +37,4 @@ export class JobPlace {
     const site = this.job().site;
     return site ? addressLines(site.address) : [];
   });
-}
-
-/** The lines of an address as on an envelope, without the empty ones. */
-export function addressLines({ street, street2, city, region, postalCode }: Address): string[] {
-  const place = [city, [region, postalCode].filter(Boolean).join(' ')].filter(Boolean).join(', ');
-  return [street, street2, place].filter(Boolean);
 }
