@@ -2,7 +2,7 @@ import { setTimeout as sleep } from 'node:timers/promises';
 
 /** The database's ways to say "you lost a race, start again": changed snapshot, lock wait timeout, deadlock. */
 const LOST_RACES = new Set([1020, 1205, 1213]);
-const ATTEMPTS = 12;
+const ATTEMPTS = 20;
 
 export function errorNumber(error: unknown): number | undefined {
   const errno = (error as { errno?: unknown; driverError?: { errno?: unknown } } | null)?.errno;

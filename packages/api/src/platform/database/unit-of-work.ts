@@ -22,10 +22,13 @@ export class UnitOfWork {
   /**
    * One transaction. `work` may run several times, so it must have no effect outside the scope it is given: mail and
    * calls to others go through the outbox.
+   *
+   * READ COMMITTED, so that who waits for a locked row then sees what the one before left there. A snapshot taken before
+   * the wait would be refused instead, and of fifty that want one number only one would get on at each try.
    */
   async transaction<Result>(stamp: Stamp, work: (scope: GlobalScope) => Promise<Result>): Promise<Result> {
     const result = await retryLostRaces(() =>
-      this.dataSource.transaction((manager) => work(new GlobalScope(manager, stamp))),
+      this.dataSource.transaction('READ COMMITTED', (manager) => work(new GlobalScope(manager, stamp))),
     );
     for (const callback of this.afterCommit) callback();
     return result;

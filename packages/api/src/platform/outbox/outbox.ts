@@ -95,7 +95,7 @@ export class OutboxWorker {
   private claim(): Promise<OutboxMessage[]> {
     const now = this.clock();
     return retryLostRaces(() =>
-      this.dataSource.transaction(async (manager) => {
+      this.dataSource.transaction('READ COMMITTED', async (manager) => {
         const messages = await manager
           .createQueryBuilder(OutboxMessage, 'message')
           .where('message.finishedAt is null and message.dueAt <= :now', { now })
