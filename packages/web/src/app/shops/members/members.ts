@@ -64,7 +64,9 @@ export class Members {
       ? [{ key: 'cost', header: 'Cost of an hour', align: 'end' as const }]
       : []),
     { key: 'joinedAt', header: 'Since', align: 'end', phone: 'hidden' },
-    ...(this.mayRemove() ? [{ key: 'menu', header: '', align: 'end' as const, phone: 'side' as const }] : []),
+    ...(this.mayRemove()
+      ? [{ key: 'menu', header: 'Actions', align: 'end' as const, phone: 'side' as const }]
+      : []),
   ]);
 
   constructor() {

@@ -37,6 +37,7 @@ import { membersFeature } from '../state/members.state';
 
     .row-menu {
       margin-block: -12px;
+      vertical-align: middle;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -52,7 +53,7 @@ export class OpenInvitations {
     { key: 'invitedBy', header: 'By', text: ({ invitedBy }) => invitedBy, phone: 'hidden' },
     { key: 'sentAt', header: 'Sent', align: 'end', phone: 'hidden' },
     { key: 'expiresAt', header: 'Works until', align: 'end' },
-    { key: 'menu', header: '', align: 'end', phone: 'side' },
+    { key: 'menu', header: 'Actions', align: 'end', phone: 'side' },
   ];
 
   protected isOver({ expiresAt }: Invitation): boolean {
