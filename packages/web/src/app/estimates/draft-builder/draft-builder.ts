@@ -14,6 +14,7 @@ import type { Estimate } from '@bookmatch/common/estimates/estimates-contract';
 import { MAX_ROOMS } from '@bookmatch/common/estimates/revision-contract';
 import { Store } from '@ngrx/store';
 import { EmptyState } from '../../ui/empty-state/empty-state';
+import { MoneyPipe } from '../../ui/formats/money.pipe';
 import { Panel } from '../../ui/panel/panel';
 import { warnBeforeUnload } from '../../ui/unsaved-changes/unsaved-changes';
 import { DraftEditor } from '../draft/draft-editor';
@@ -34,6 +35,7 @@ import { WordsEditor } from '../words-editor/words-editor';
     EmptyState,
     MatButton,
     MatIcon,
+    MoneyPipe,
     Panel,
     PricePanel,
     RoomEditor,

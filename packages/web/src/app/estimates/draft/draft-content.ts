@@ -26,12 +26,11 @@ export function readDraft(fields: DraftFields): Read {
   }));
   const parsed = saveRevisionSchema.safeParse(contentOf({ ...fields, rooms }));
   if (parsed.success) return { content: parsed.data };
-  return {
-    problems: parsed.error.issues.map(({ path, message }) => ({
-      path: placeOnForm(path, begun).map(String).join('.'),
-      message,
-    })),
-  };
+  const problems = parsed.error.issues.map(({ path, message }) => ({
+    path: placeOnForm(path, begun).map(String).join('.'),
+    message,
+  }));
+  return { problems: onePerField(problems) };
 }
 
 /** The same for figures that follow the typing: what cannot be read yet counts nothing. */
@@ -94,6 +93,15 @@ function placeOnForm(path: readonly PropertyKey[], begun: readonly number[][]): 
   const [rooms, room, lines, line, ...field] = path;
   if (rooms !== 'rooms' || lines !== 'lines' || line === undefined) return path;
   return [rooms, room ?? 0, lines, begun[Number(room)]?.[Number(line)] ?? line, ...field];
+}
+
+/** The first sentence for each field; what is said of a whole follows from what is wrong with a part of it. */
+function onePerField(problems: readonly FieldProblem[]): FieldProblem[] {
+  return problems.filter(
+    ({ path }, at) =>
+      problems.findIndex((other) => other.path === path) === at &&
+      !problems.some((other) => other.path.startsWith(`${path}.`)),
+  );
 }
 
 const isDecimal = (text: string): boolean => /^\d{1,9}(\.\d{1,6})?$/.test(text);

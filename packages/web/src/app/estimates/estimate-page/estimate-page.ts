@@ -62,6 +62,7 @@ import { selectEstimate, selectOpenProblem } from '../state/estimates.selectors'
     StatusChip,
   ],
   templateUrl: './estimate-page.html',
+  styles: 'bm-status-chip { margin-inline-end: 6px; }',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class EstimatePage implements HasUnsavedChanges {

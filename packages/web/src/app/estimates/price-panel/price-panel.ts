@@ -64,8 +64,12 @@ export class PricePanel {
       { name: 'Sales tax', note: '', cents: taxCents },
     ]);
   });
-  protected readonly percent = (share: string | null): string =>
-    share === null ? 'none yet' : formatRate(share, 1);
+  protected readonly shares = computed(() => {
+    const { margin, markup } = this.totals();
+    return [margin && formatRate(margin, 1), markup && `markup ${formatRate(markup, 1)}`]
+      .filter(Boolean)
+      .join(', ');
+  });
   protected readonly money = (cents: number): string => moneyText(cents, this.currency());
 
   private linesOf(parts: readonly PricePart[]): WorkingLine[] {
