@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, effect, inject } from '@a
 import { MatButton } from '@angular/material/button';
 import { MatIcon } from '@angular/material/icon';
 import { RouterLink } from '@angular/router';
-import { LEAD_STAGE_NAMES } from '@bookmatch/common/leads/lead-stages';
+import { isOpenLead, LEAD_STAGE_NAMES } from '@bookmatch/common/leads/lead-stages';
 import { LEAD_SOURCE_NAMES } from '@bookmatch/common/leads/lead-words';
 import type { LeadRow } from '@bookmatch/common/leads/leads-contract';
 import { Store } from '@ngrx/store';
@@ -61,9 +61,19 @@ export class LeadList {
     { key: 'title', header: 'Lead', sort: 'title', width: '30%' },
     { key: 'stage', header: 'Stage', phone: 'side' },
     { key: 'nextStep', header: 'Next step', text: ({ nextStep }) => nextStep, width: '20%', phone: 'hidden' },
-    { key: 'nextStepOn', header: 'On', sort: BY_NEXT_STEP },
+    {
+      key: 'nextStepOn',
+      header: 'On',
+      sort: BY_NEXT_STEP,
+      text: ({ stage, nextStepOn }) => (isOpenLead(stage) ? (nextStepOn ?? '') : ''),
+    },
     { key: 'source', header: 'Source', text: ({ source }) => LEAD_SOURCE_NAMES[source], phone: 'hidden' },
-    { key: 'expected', header: 'Expected', align: 'end' },
+    {
+      key: 'expected',
+      header: 'Expected',
+      align: 'end',
+      text: ({ expectedCents }) => (expectedCents == null ? '' : String(expectedCents)),
+    },
     { key: 'createdAt', header: 'Came in', sort: 'createdAt', align: 'end', phone: 'hidden' },
   ];
   protected readonly linkOf = ({ id }: LeadRow): string => `/leads/${id}`;

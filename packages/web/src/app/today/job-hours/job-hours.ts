@@ -12,7 +12,7 @@ import { Panel } from '../../ui/panel/panel';
   selector: 'bm-job-hours',
   imports: [LeafPair, MatButton, Panel, RouterLink],
   template: `
-    <bm-panel heading="Hours of the jobs in hand" flush>
+    <bm-panel heading="Hours by job" flush>
       <a matButton bmPanelAction routerLink="/jobs" [queryParams]="{ stage: 'open', sort: 'installOn' }">
         {{ count() > jobs().length ? 'All ' + count() : 'List' }}<span class="bm-spoken">: jobs in hand</span>
       </a>

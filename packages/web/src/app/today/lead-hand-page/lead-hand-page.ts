@@ -16,7 +16,7 @@ import { TaskList } from '../task-list/task-list';
   imports: [DateTextPipe, JobHours, MatButton, PageHead, RouterLink, TaskList],
   template: `
     <bm-page-head name="Today">
-      <span bmFacts>{{ page().on | dateText }} · {{ ownDay() }}</span>
+      <span bmFacts>{{ page().on | dateText }}{{ ownDay() ? ' · ' + ownDay() : '' }}</span>
       <a matButton="filled" routerLink="/jobs/board">Jobs by stage</a>
     </bm-page-head>
     <div class="bm-columns">
@@ -35,12 +35,12 @@ import { TaskList } from '../task-list/task-list';
           nothing="Nobody is clocked in."
         />
         <bm-task-list
-          heading="Next to install"
+          heading="Later jobs"
           listLink="/jobs"
           [listParams]="{ stage: 'open', sort: 'installOn' }"
           [tasks]="jobs()"
           [count]="page().jobsInHand.count"
-          nothing="No jobs in hand."
+          nothing="No other jobs in hand."
         />
       </div>
       <bm-job-hours [jobs]="page().jobsInHand.rows" [count]="page().jobsInHand.count" />
@@ -57,14 +57,16 @@ export class LeadHandPage {
     this.page().installsThisWeek.map((job) => installTask(job, this.page().on)),
   );
   protected readonly jobs = computed(() =>
-    this.page().jobsInHand.rows.map((job) => installTask(job, this.page().on)),
+    this.page()
+      .jobsInHand.rows.filter((job) => !this.page().installsThisWeek.some(({ id }) => id === job.id))
+      .map((job) => installTask(job, this.page().on)),
   );
   protected readonly clocked = computed(() =>
     this.page().onTheClock.map((entry) => clockedTask(entry, this.zone())),
   );
   protected readonly ownDay = computed(() => {
     const { open, todayMinutes } = this.page().clock;
-    const worked = `${formatDuration(todayMinutes)} of your own clocked today`;
-    return open ? `${worked}, on the clock now` : worked;
+    const worked = todayMinutes > 0 ? `you clocked ${formatDuration(todayMinutes)} so far` : '';
+    return [worked, open ? 'you are on the clock' : ''].filter(Boolean).join(' · ');
   });
 }

@@ -65,6 +65,11 @@ export class OwnerPage {
       count,
     })),
   );
+  /** Those with a question come first, so the rows shown are enough to tell. */
+  protected readonly asked = computed(() => {
+    const asking = this.page().estimatesWaiting.rows.filter(({ openQuestions }) => openQuestions > 0);
+    return asking.length > 0 ? `${asking.length} with a question` : '';
+  });
   protected readonly openLeads = computed(() => total(this.leadStages()));
   protected readonly openJobs = computed(() => total(this.jobStages()));
   protected readonly weekHours = computed(() => formatHours(this.page().weekMinutes));

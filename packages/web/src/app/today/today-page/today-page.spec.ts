@@ -56,7 +56,7 @@ describe('the first page', () => {
 
   it('of the lead hand shows jobs and installs', async () => {
     const { element } = await open(buildLeadHandToday());
-    expect(element.textContent).toContain('1 h 35 m of your own clocked today');
+    expect(element.textContent).toContain('you clocked 1 h 35 m so far');
     expect(element.textContent).toContain('Job 1042 · Wren Halloway · Building');
     expect(element.textContent).not.toContain('$');
   });

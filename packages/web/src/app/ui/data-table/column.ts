@@ -6,7 +6,10 @@ export type Column<Row> = {
   sort?: string;
   /** Figures stand at the end. */
   align?: 'start' | 'end';
-  /** The cell's text; a `bmCell` template of the same key takes its place. */
+  /**
+   * The cell's text; a `bmCell` template of the same key takes its place. A cell whose text is empty is left out of a
+   * narrow row.
+   */
   text?: (row: Row) => string;
   /** Where it stands in the two-line row of a narrow place; without it the first is the title, the others the second line. */
   phone?: 'title' | 'side' | 'line' | 'hidden';

@@ -82,7 +82,7 @@ export class DataTable<Row extends { id: string }> {
   }
 
   protected isBlank(column: Column<Row>, row: Row): boolean {
-    return !this.templates().has(column.key) && !column.text?.(row);
+    return column.text ? !column.text(row) : !this.templates().has(column.key);
   }
 
   protected sortBy(key: string): void {
