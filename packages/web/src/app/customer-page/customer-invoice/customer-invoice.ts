@@ -12,7 +12,7 @@ import { MatIcon } from '@angular/material/icon';
 import { ActivatedRoute } from '@angular/router';
 import type { CustomerInvoice as InvoiceView } from '@bookmatch/common/customer-page/customer-page-contract';
 import { standingWords, PAYMENT_METHOD_NAMES } from '@bookmatch/common/invoices/invoice-words';
-import { formatMoney } from '@bookmatch/common/money/format';
+import { formatAmount, formatMoney } from '@bookmatch/common/money/format';
 import { Store } from '@ngrx/store';
 import { DateTextPipe } from '../../ui/formats/date-text.pipe';
 import { Panel } from '../../ui/panel/panel';
@@ -62,6 +62,8 @@ export class CustomerInvoice {
       untracked(() => this.store.dispatch(InvoicePage.opened({ token, invoice, arrival: this.arrival() })));
     });
   }
+
+  protected readonly amount = formatAmount;
 
   protected money(cents: number): string {
     return formatMoney(cents, this.invoice().currency);

@@ -93,15 +93,15 @@ export class InvoiceDetail {
   }
 
   protected openPayment(): void {
-    this.dialog.open(PaymentDialog, { data: this.id(), width: '520px', disableClose: true });
+    this.dialog.open(PaymentDialog, { data: this.id(), width: '600px', disableClose: true });
   }
 
   protected openRefund(): void {
-    this.dialog.open(RefundDialog, { data: this.id(), width: '520px', disableClose: true });
+    this.dialog.open(RefundDialog, { data: this.id(), width: '600px', disableClose: true });
   }
 
   protected openCredit(): void {
-    this.dialog.open(CreditDialog, { data: this.id(), width: '520px', disableClose: true });
+    this.dialog.open(CreditDialog, { data: this.id(), width: '600px', disableClose: true });
   }
 
   protected copyLink({ id }: Invoice): void {

@@ -17,7 +17,8 @@ export class InvoiceLines {
   protected readonly currency = inject(SHOP_CURRENCY);
   protected readonly taxName = computed(() => {
     const { taxRate } = this.invoice();
-    return taxRate === null ? 'Sales tax, as agreed' : `Sales tax, ${formatRate(taxRate)}`;
+    if (taxRate === null) return 'Sales tax, as agreed';
+    return Number(taxRate) === 0 ? 'Sales tax' : `Sales tax, ${formatRate(taxRate)}`;
   });
   /** With one line and no difference between lines it needs no mark. */
   protected readonly someUntaxed = computed(() => {

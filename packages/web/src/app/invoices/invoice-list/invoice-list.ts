@@ -32,7 +32,6 @@ import { selectInvoiceList, selectTotals } from '../state/invoices.selectors';
     Cell,
     ChoiceField,
     DataTable,
-    DateTextPipe,
     EmptyState,
     InvoiceViews,
     MatButton,
@@ -45,6 +44,8 @@ import { selectInvoiceList, selectTotals } from '../state/invoices.selectors';
     StandingChip,
     StatusChip,
   ],
+  // Columns write dates as text, so that an empty one leaves no gap on a phone.
+  providers: [DateTextPipe],
   templateUrl: './invoice-list.html',
   styleUrl: './invoice-list.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -53,6 +54,7 @@ export class InvoiceList {
   private readonly store = inject(Store);
   private readonly api = inject(InvoicesApiClient);
   private readonly currency = inject(SHOP_CURRENCY);
+  private readonly dateText = inject(DateTextPipe);
   protected readonly can = injectCan();
   protected readonly address = injectListAddress('standing', 'customerId', 'jobId', 'issuedFrom', 'issuedTo');
   protected readonly list = this.store.selectSignal(selectInvoiceList);
@@ -73,10 +75,16 @@ export class InvoiceList {
     { key: 'number', header: 'Invoice', sort: 'number', width: '92px' },
     { key: 'customer', header: 'Customer', text: ({ customerName }) => customerName, width: '24%' },
     { key: 'what', header: 'For', text: whatFor, phone: 'hidden' },
-    { key: 'issuedOn', header: 'Issued', sort: 'issuedOn', phone: 'hidden' },
-    { key: 'dueOn', header: 'Due', sort: 'dueOn' },
-    { key: 'total', header: `Total, ${this.currency()}`, align: 'end', phone: 'hidden' },
-    { key: 'balance', header: `Balance, ${this.currency()}`, align: 'end', phone: 'side' },
+    {
+      key: 'issuedOn',
+      header: 'Issued',
+      sort: 'issuedOn',
+      text: (row) => this.day(row.issuedOn),
+      phone: 'hidden',
+    },
+    { key: 'dueOn', header: 'Due', sort: 'dueOn', text: (row) => this.day(row.dueOn) },
+    { key: 'total', header: `Total, ${this.currency()}`, align: 'end', phone: 'side' },
+    { key: 'balance', header: `Balance, ${this.currency()}`, align: 'end', phone: 'hidden' },
     { key: 'standing', header: 'Standing', width: '150px' },
   ]);
   protected readonly linkOf = ({ id }: InvoiceRow): string => `/invoices/${id}`;
@@ -84,6 +92,10 @@ export class InvoiceList {
   constructor() {
     effect(() => this.load());
     this.store.dispatch(InvoicesPage.totalsWanted());
+  }
+
+  private day(date: string | null): string {
+    return this.dateText.transform(date);
   }
 
   protected load(): void {

@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, effect, inject, input } from '@angular/core';
-import type { AccountCode } from '@bookmatch/common/ledger/chart-of-accounts';
+import type { AccountCode, LedgerSide } from '@bookmatch/common/ledger/chart-of-accounts';
+import { formatAmount } from '@bookmatch/common/money/format';
 import { Store } from '@ngrx/store';
 import { injectListAddress } from '../../platform/lists/list-address';
 import { Cell } from '../../ui/data-table/cell';
@@ -38,8 +39,8 @@ export class AccountActivity {
     { key: 'memo', header: 'What', text: ({ memo }) => memo, phone: 'title' },
     { key: 'number', header: 'Entry', sort: 'number', text: ({ entryNumber }) => String(entryNumber) },
     { key: 'on', header: 'Counts on' },
-    { key: 'debit', header: 'Debit', align: 'end', phone: 'line' },
-    { key: 'credit', header: 'Credit', align: 'end', phone: 'line' },
+    { key: 'debit', header: 'Debit', align: 'end', text: (row) => onSide(row, 'debit') },
+    { key: 'credit', header: 'Credit', align: 'end', text: (row) => onSide(row, 'credit') },
     { key: 'balance', header: `Balance, ${this.currency()}`, align: 'end', phone: 'side' },
   ]);
   protected readonly linkOf = ({ entryId }: ActivityRow): string => `/ledger/entries/${entryId}`;
@@ -51,4 +52,8 @@ export class AccountActivity {
   protected load(): void {
     this.store.dispatch(LedgerPage.activityOpened({ code: this.code(), query: this.address.query() }));
   }
+}
+
+function onSide({ side, amountCents }: ActivityRow, wanted: LedgerSide): string {
+  return side === wanted ? formatAmount(amountCents) : '';
 }
