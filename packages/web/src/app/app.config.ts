@@ -25,8 +25,9 @@ import { PageTitle } from './platform/page/page-title';
 import { shopSlugOf } from './platform/session/address';
 import { CurrentShop } from './platform/session/current-shop';
 import { provideSession } from './platform/session/session.providers';
-import { BANNER_SLOT } from './shell/slots';
+import { BANNER_SLOT, CLOCK_SLOT } from './shell/slots';
 import { subscriptionBanner } from './subscription/subscription-public';
+import { clockSlot } from './time/time-public';
 import { keepNavCounts } from './today/today-public';
 import { registerIcons } from './ui/icons/register-icons';
 import { SHOP_CURRENCY, SHOP_UNITS, SHOP_ZONE } from './ui/formats/shop-settings';
@@ -56,6 +57,7 @@ export const appConfig: ApplicationConfig = {
     { provide: MAT_FORM_FIELD_DEFAULT_OPTIONS, useValue: formFields },
     { provide: BANNER_SLOT, useValue: subscriptionBanner },
     { provide: SESSION_RENEWAL, useFactory: sessionRenewal },
+    { provide: CLOCK_SLOT, useValue: clockSlot },
     { provide: SHOP_CURRENCY, useFactory: () => inject(CurrentShop).currency },
     { provide: SHOP_ZONE, useFactory: () => inject(CurrentShop).timeZone },
     { provide: SHOP_UNITS, useFactory: () => inject(CurrentShop).unitSystem },
