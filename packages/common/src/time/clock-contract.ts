@@ -44,7 +44,7 @@ export const clockJobsSchema = z.object({
       planned: z.array(z.object({ operationId: idSchema, minutesLeft: z.int() })),
     }),
   ),
-  /** The shop's operations that are done on a job, in its order; a job may need one that was not planned. */
-  operations: z.array(z.object({ operationId: idSchema, operationName: z.string() })),
+  /** The shop's operations in its order: a job may need one that was not planned, and some belong to no job. */
+  operations: z.array(z.object({ operationId: idSchema, operationName: z.string(), onJob: z.boolean() })),
 });
 export type ClockJobs = z.infer<typeof clockJobsSchema>;

@@ -6,12 +6,12 @@ import { clockedMinutes } from './minutes-left.js';
 
 const MOST_JOBS = 200;
 
-/** Every open job that the member may clock in to, the newest first, and what there is to do on a job. */
+/** Every open job that the member may clock in to, the newest first, and the operations in use. */
 export async function clockJobs(scope: ShopScope): Promise<ClockJobs> {
   const [jobs, planned, operations] = await Promise.all([
     openJobs(scope),
     plannedWork(scope),
-    operationsOnJobs(scope),
+    operationsInUse(scope),
   ]);
   return {
     jobs: jobs.map((job) => ({ ...job, planned: planned.get(job.jobId) ?? [] })),
@@ -58,11 +58,11 @@ type StoredPlan = {
   clockedMinutes: number | string;
 };
 
-function operationsOnJobs(scope: ShopScope): Promise<ClockJobs['operations']> {
+function operationsInUse(scope: ShopScope): Promise<ClockJobs['operations']> {
   return scope
     .query(Operation, 'operation')
-    .pick({ operationId: 'operation.id', operationName: 'operation.name' })
-    .where('operation.onJob = 1 and operation.archivedAt is null')
+    .pick({ operationId: 'operation.id', operationName: 'operation.name', onJob: 'operation.onJob' })
+    .where('operation.archivedAt is null')
     .orderBy('operation.position')
     .all();
 }

@@ -18,9 +18,19 @@ import { TimeEntry } from './time-entry.entity.js';
 export class ClockService {
   /** Clocks in, or switches: an open entry is closed at the same instant. */
   async clockIn(scope: ShopScope, punch: ClockIn): Promise<Punched> {
+    return answer(scope, await this.punchIn(scope, punch));
+  }
+
+  /** Closes an entry. One that is closed already, by whatever came first, stays as it is. */
+  async clockOut(scope: ShopScope, entryId: string, punch: ClockOut): Promise<Punched> {
+    return answer(scope, await this.punchOut(scope, entryId, punch));
+  }
+
+  /** The punch alone, for work that does not look at the clock afterwards. Answers the entry's id. */
+  async punchIn(scope: ShopScope, punch: ClockIn): Promise<string> {
     const member = await lockTimeOf(scope, scope.memberId);
     const known = await scope.rows(TimeEntry).find(punch.entryId);
-    if (known) return answer(scope, own(scope, known).id);
+    if (known) return own(scope, known).id;
 
     const at = punchMinute(punch.at);
     const open = await openEntryOf(scope, member.id);
@@ -33,11 +43,11 @@ export class ClockService {
       ...{ startedAt: new Date(at), endedAt: null, minutes: null, corrected: false, voidedAt: null },
       ...{ laborCostCentsPerHour: member.laborCostCentsPerHour, costCents: null },
     });
-    return answer(scope, punch.entryId);
+    return punch.entryId;
   }
 
-  /** Closes an entry. One that is closed already, by whatever came first, stays as it is. */
-  async clockOut(scope: ShopScope, entryId: string, punch: ClockOut): Promise<Punched> {
+  /** The same for the end. */
+  async punchOut(scope: ShopScope, entryId: string, punch: ClockOut): Promise<string> {
     await lockTimeOf(scope, scope.memberId);
     const entry = own(scope, await this.punched(scope, entryId));
     if (entry.endedAt === null && entry.voidedAt === null) {
@@ -45,7 +55,7 @@ export class ClockService {
       refuse(refuseClockOut(at, now(scope), spanOf(entry), await around(scope, entry, at)));
       await this.close(scope, entry, at, punch.note);
     }
-    return answer(scope, entryId);
+    return entryId;
   }
 
   private async punched(scope: ShopScope, entryId: string): Promise<TimeEntry> {

@@ -256,15 +256,17 @@ describe('the clock', () => {
     const { body } = await crew.get('/time/clock/jobs');
     const { jobs, operations } = body as {
       jobs: { jobId: string; planned: object[] }[];
-      operations: { operationName: string }[];
+      operations: { operationName: string; onJob: boolean }[];
     };
     expect(jobs.map((job) => job.jobId)).toContain(jobId);
     expect(jobs.map((job) => job.jobId)).not.toContain(hidden);
     expect(jobs.find((job) => job.jobId === jobId)?.planned).toEqual([
       { operationId: steps.operation('Face frames'), minutesLeft: 540 },
     ]);
-    expect(operations.map((row) => row.operationName)).toContain('Measure and draw');
-    expect(operations.map((row) => row.operationName)).not.toContain('Shop, not on a job');
+    expect(operations.find((row) => row.operationName === 'Measure and draw')).toMatchObject({ onJob: true });
+    expect(operations.find((row) => row.operationName === 'Shop, not on a job')).toMatchObject({
+      onJob: false,
+    });
   });
 
   it('counts today on the wall of the shop, also of a shift that ran in from yesterday', async () => {
