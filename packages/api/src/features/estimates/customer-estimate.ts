@@ -1,7 +1,7 @@
 import type { CustomerEstimate } from '@bookmatch/common/customer-page/customer-page-contract';
 import type { ShopScope } from '../../platform/database/scope.js';
 import { conflict, notFound } from '../../platform/http/problem-error.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { todayOf } from '../shops/shops-public.js';
 import { EstimateAcceptance } from './estimate-acceptance.entity.js';
 import { estimatePdf } from './estimate-pdf.js';
 import { questionsOf } from './estimate-questions.js';
@@ -16,7 +16,7 @@ export async function customerEstimate(scope: ShopScope, estimateId: string): Pr
   if (!document || documentHash === null) throw new TypeError('What was sent has a document and its hash.');
   const acceptance = await scope.rows(EstimateAcceptance).findOneBy({ estimateId });
   return {
-    status: statusOf(revision, todayAt(await shopOf(scope), scope.now)),
+    status: statusOf(revision, await todayOf(scope)),
     document,
     documentHash,
     questions: await questionsOf(scope, estimateId),

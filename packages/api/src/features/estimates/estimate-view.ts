@@ -19,7 +19,7 @@ import { EstimateSend } from './estimate-send.entity.js';
 import { currentOf } from './estimate-standing.js';
 import { Estimate } from './estimate.entity.js';
 import { loadContent } from './revision-content.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { todayOf } from '../shops/shops-public.js';
 
 /** The estimate with everything its page shows. */
 export async function viewEstimate(
@@ -29,7 +29,7 @@ export async function viewEstimate(
 ): Promise<EstimateView> {
   const estimate = await scope.rows(Estimate).get(id);
   const revisions = await scope.rows(EstimateRevision).findBy({ estimateId: id }, 'number');
-  const today = todayAt(await shopOf(scope), scope.now);
+  const today = await todayOf(scope);
   const current = currentOf(revisions);
   return {
     id,

@@ -19,7 +19,7 @@ import type { ShopScope } from '../../platform/database/scope.js';
 import { conflict, notFound, refuse } from '../../platform/http/problem-error.js';
 import { Customer, Site } from '../customers/customers-public.js';
 import { beginEstimating } from '../leads/leads-public.js';
-import { shopOf, takeNumber, todayAt } from '../shops/shops-public.js';
+import { shopOf, takeNumber, todayOf } from '../shops/shops-public.js';
 import { copiedContent } from './copied-content.js';
 import type { EstimateHooks } from './estimate-hooks.js';
 import { EstimateRevision } from './estimate-revision.entity.js';
@@ -123,7 +123,7 @@ export class EstimatesService {
   }
 
   private async view(scope: ShopScope, revision: EstimateRevision): Promise<RevisionView> {
-    const today = todayAt(await shopOf(scope), scope.now);
+    const today = await todayOf(scope);
     return viewRevision(revision, await loadContent(scope, revision), today);
   }
 }

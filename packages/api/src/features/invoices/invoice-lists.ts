@@ -7,7 +7,7 @@ import type { ShopScope } from '../../platform/database/scope.js';
 import { keysetPage, likePattern } from '../../platform/http/keyset.js';
 import { Customer } from '../customers/customers-public.js';
 import { Job, JobBillingStage } from '../jobs/jobs-public.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { todayOf } from '../shops/shops-public.js';
 import { Invoice } from './invoice.entity.js';
 
 type StoredRow = Omit<InvoiceRow, 'standing' | 'daysOverdue' | 'createdAt'> & {
@@ -32,7 +32,7 @@ const COLUMNS = {
 
 /** The list of invoices. */
 export async function listInvoices(scope: ShopScope, request: InvoiceListQuery): Promise<Page<InvoiceRow>> {
-  const today = todayAt(await shopOf(scope), scope.now);
+  const today = await todayOf(scope);
   const query = invoicesQuery(scope);
   narrow(query, request, today);
   const page = await keysetPage<StoredRow, SortKey>(query, COLUMNS, request);

@@ -16,7 +16,7 @@ import {
 } from '@bookmatch/common/invoices/invoices-contract';
 import type { ShopScope } from '../../platform/database/scope.js';
 import { shopRoute, type Route } from '../../platform/http/route.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { todayOf } from '../shops/shops-public.js';
 import { creditNoteDocument, invoiceDocument } from './invoice-documents.js';
 import { exportAging, exportInvoices } from './invoice-exports.js';
 import type { InvoiceServices } from './invoice-services.js';
@@ -24,7 +24,7 @@ import { listInvoices } from './invoice-lists.js';
 import { readInvoice } from './invoice-view.js';
 import { readAging, readTotals } from './receivables.js';
 
-const today = async (scope: ShopScope) => todayAt(await shopOf(scope), scope.now);
+const today = async (scope: ShopScope) => await todayOf(scope);
 
 export function invoicesRoutes(services: InvoiceServices): Route[] {
   return [...readingRoutes(), ...draftRoutes(services), ...commandRoutes(services)];

@@ -1,7 +1,7 @@
 import { invoiceStanding } from '@bookmatch/common/invoices/invoice-standing';
 import type { ShopScope } from '../../platform/database/scope.js';
 import type { JobBilling, JobInvoice } from '../jobs/jobs-public.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { todayOf } from '../shops/shops-public.js';
 import { CreditNote } from './credit-note.entity.js';
 import { Invoice } from './invoice.entity.js';
 
@@ -14,7 +14,7 @@ export const jobInvoices: JobBilling = {
       scope,
       invoices.map(({ id }) => id),
     );
-    const today = todayAt(await shopOf(scope), scope.now);
+    const today = await todayOf(scope);
     return invoices.map((invoice) => viewInvoice(invoice, creditedNet.get(invoice.id) ?? 0, today));
   },
 };

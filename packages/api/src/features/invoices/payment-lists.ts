@@ -4,11 +4,11 @@ import type { ShopScope } from '../../platform/database/scope.js';
 import type { ShopQuery } from '../../platform/database/shop-query.js';
 import { keysetPage, likePattern } from '../../platform/http/keyset.js';
 import { Customer } from '../customers/customers-public.js';
-import { memberNames } from '../shops/shops-public.js';
+import { Member } from '../shops/shops-public.js';
 import { Invoice } from './invoice.entity.js';
 import { Payment } from './payment.entity.js';
 
-type StoredRow = Omit<PaymentRow, 'createdAt' | 'recordedBy'> & { memberId: string | null; createdAt: Date };
+type StoredRow = Omit<PaymentRow, 'createdAt'> & { createdAt: Date };
 
 /** Every payment of the shop, the last received first. */
 export async function listPayments(scope: ShopScope, request: PaymentListQuery): Promise<Page<PaymentRow>> {
@@ -24,8 +24,7 @@ export async function listPayments(scope: ShopScope, request: PaymentListQuery):
     standard: '-receivedOn',
   } as const;
   const page = await keysetPage<StoredRow, 'receivedOn'>(query, columns, request);
-  const names = await memberNames(scope);
-  return { ...page, rows: page.rows.map((row) => viewRow(row, names)) };
+  return { ...page, rows: page.rows.map(viewRow) };
 }
 
 /**
@@ -44,12 +43,11 @@ export async function paymentsSince(
     .orderBy('payment.id', 'DESC')
     .limit(limit)
     .all<StoredRow & { inAll: number | string; centsInAll: number | string }>();
-  const names = await memberNames(scope);
   const [first] = rows;
   return {
     count: Number(first?.inAll ?? 0),
     cents: Number(first?.centsInAll ?? 0),
-    rows: rows.map(({ inAll: _inAll, centsInAll: _centsInAll, ...row }) => viewRow(row, names)),
+    rows: rows.map(({ inAll: _inAll, centsInAll: _centsInAll, ...row }) => viewRow(row)),
   };
 }
 
@@ -58,6 +56,7 @@ function paymentsQuery(scope: ShopScope): ShopQuery {
     .query(Payment, 'payment')
     .join(Invoice, 'invoice', 'invoice.id = payment.invoiceId')
     .join(Customer, 'customer', 'customer.id = invoice.customerId')
+    .leftJoin(Member, 'member', 'member.id = payment.memberId')
     .leftJoin(Payment, 'reversal', 'reversal.reversesId = payment.id')
     .pick({
       id: 'payment.id',
@@ -70,7 +69,7 @@ function paymentsQuery(scope: ShopScope): ShopQuery {
       reversesId: 'payment.reversesId',
       reversedById: 'reversal.id',
       reason: 'payment.reason',
-      memberId: 'payment.memberId',
+      recordedBy: '(select person.name from person where person.id = member.person_id)',
       createdAt: 'payment.createdAt',
       invoiceId: 'payment.invoiceId',
       invoiceNumber: 'invoice.number',
@@ -78,10 +77,6 @@ function paymentsQuery(scope: ShopScope): ShopQuery {
     });
 }
 
-function viewRow({ memberId, ...row }: StoredRow, names: ReadonlyMap<string, string>): PaymentRow {
-  return {
-    ...row,
-    recordedBy: memberId ? (names.get(memberId) ?? null) : null,
-    createdAt: row.createdAt.toISOString(),
-  };
+function viewRow(row: StoredRow): PaymentRow {
+  return { ...row, createdAt: row.createdAt.toISOString() };
 }

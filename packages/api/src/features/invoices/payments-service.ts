@@ -9,7 +9,7 @@ import { postPayment, postRefund, postReversal } from '@bookmatch/common/ledger/
 import type { ShopScope } from '../../platform/database/scope.js';
 import { notFound, refuse } from '../../platform/http/problem-error.js';
 import { openBooks, postEntry } from '../ledger/ledger-public.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { shopOf, todayAt, todayOf } from '../shops/shops-public.js';
 import type { CardCheckout } from './card-checkout.entity.js';
 import { withdrawCheckouts } from './checkout-withdrawal.js';
 import { moveAmounts } from './invoice-amounts.js';
@@ -61,7 +61,7 @@ export class PaymentsService {
       method: wrong.method,
       amountCents: -wrong.amountCents,
       appliedCents: -wrong.appliedCents,
-      receivedOn: todayAt(await shopOf(scope), scope.now),
+      receivedOn: await todayOf(scope),
       reference: wrong.reference,
       reversesId: id,
       reason,

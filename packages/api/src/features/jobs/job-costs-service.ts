@@ -2,7 +2,7 @@ import type { CreateJobCost, JobCost as JobCostView } from '@bookmatch/common/jo
 import { isDuplicateKey } from '../../platform/database/retry.js';
 import type { ShopScope } from '../../platform/database/scope.js';
 import { conflict, invalid, notFound } from '../../platform/http/problem-error.js';
-import { memberNames, shopOf, todayAt } from '../shops/shops-public.js';
+import { memberNames, todayOf } from '../shops/shops-public.js';
 import { readJob } from './job-access.js';
 import { JobCost } from './job-cost.entity.js';
 
@@ -19,8 +19,7 @@ export class JobCostsService {
 
   async add(scope: ShopScope, jobId: string, input: CreateJobCost): Promise<JobCostView> {
     await readJob(scope, jobId);
-    if (input.onDate > todayAt(await shopOf(scope), scope.now))
-      throw invalid('onDate', 'A cost cannot be of a day to come.');
+    if (input.onDate > (await todayOf(scope))) throw invalid('onDate', 'A cost cannot be of a day to come.');
     return this.insert(scope, { ...input, jobId, reversesId: null, reason: '' });
   }
 
@@ -31,7 +30,7 @@ export class JobCostsService {
     if (!cost) throw notFound('This cost');
     if (cost.reversesId !== null) throw conflict('This is a reversal. Enter the cost again instead.');
     const { category, description, amountCents, supplier } = cost;
-    const onDate = todayAt(await shopOf(scope), scope.now);
+    const onDate = await todayOf(scope);
     try {
       const taken = { category, description, amountCents: -amountCents, supplier, onDate };
       return await this.insert(scope, { ...taken, jobId, reversesId: costId, reason });

@@ -1,7 +1,7 @@
 import { OPEN_LEAD_STAGES, type LeadListQuery } from '@bookmatch/common/leads/leads-contract';
 import type { ShopScope } from '../../platform/database/scope.js';
 import { likePattern } from '../../platform/http/keyset.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { todayOf } from '../shops/shops-public.js';
 
 /** Conditions on rows beside the alias `lead`, each with the values it names. */
 export type Conditions = { sql: string; parameters: Record<string, unknown> }[];
@@ -20,7 +20,7 @@ export async function leadConditions(
   else if (stage) add('lead.stage = :stage', { stage });
   if (source) add('lead.source = :source', { source });
   if (nextStep === 'none') add(`${IS_OPEN} and lead.nextStepOn is null`);
-  else if (nextStep) add(dueBy(nextStep), { today: todayAt(await shopOf(scope), scope.now) });
+  else if (nextStep) add(dueBy(nextStep), { today: await todayOf(scope) });
   if (q) add(TEXT, { q: likePattern(q) });
   return conditions;
 }

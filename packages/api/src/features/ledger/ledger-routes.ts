@@ -10,7 +10,7 @@ import {
 } from '@bookmatch/common/ledger/ledger-contract';
 import type { AccountCode } from '@bookmatch/common/ledger/chart-of-accounts';
 import { shopRoute, type Route } from '../../platform/http/route.js';
-import { shopOf, todayAt } from '../shops/shops-public.js';
+import { todayOf } from '../shops/shops-public.js';
 import { accountActivity } from './account-activity.js';
 import { exportLedger } from './ledger-export.js';
 import { listEntries, readEntry } from './ledger-lists.js';
@@ -43,8 +43,7 @@ export function ledgerRoutes(): Route[] {
       allow: ['read', 'LedgerEntry'],
       query: trialBalanceQuerySchema,
       answer: trialBalanceSchema,
-      handle: async ({ scope, query }) =>
-        readTrialBalance(scope, query.on ?? todayAt(await shopOf(scope), scope.now)),
+      handle: async ({ scope, query }) => readTrialBalance(scope, query.on ?? (await todayOf(scope))),
     }),
     shopRoute({
       method: 'get',

@@ -7,3 +7,8 @@ export const shopOf = (scope: ShopScope): Promise<Shop> => scope.global(Shop).ge
 
 /** The date on the wall of the shop. */
 export const todayAt = (shop: Shop, now: Date): string => dateIn(shop.timeZone, now.toISOString());
+
+/** The shop's date now, without reading the shop where its zone came with the membership. */
+export async function todayOf(scope: ShopScope): Promise<string> {
+  return dateIn(scope.timeZone ?? (await shopOf(scope)).timeZone, scope.now.toISOString());
+}

@@ -18,13 +18,15 @@ export async function memberAccess(scope: ShopScope, personId: string) {
   const row = await scope
     .query(Member, 'member')
     .join(Subscription, 'subscription', '1 = 1')
-    .pick({ memberId: 'member.id', role: 'member.role', ...STANDING_COLUMNS })
+    .joinShop(Shop, 'shop')
+    .pick({ memberId: 'member.id', role: 'member.role', timeZone: 'shop.time_zone', ...STANDING_COLUMNS })
     .where('member.personId = :personId and member.removedAt is null', { personId })
-    .first<{ memberId: string; role: Role } & StoredStanding>();
+    .first<{ memberId: string; role: Role; timeZone: string } & StoredStanding>();
   if (!row) return null;
   return {
     memberId: row.memberId,
     role: row.role,
+    timeZone: row.timeZone,
     readOnly: standingOf(row, scope.now).access === 'read-only',
   };
 }

@@ -43,8 +43,8 @@ export class GlobalScope {
   }
 
   /** The same transaction, narrowed to one shop. For sign-up, webhooks and other work that finds its shop on the way. */
-  forShop(shopId: string, ability?: Ability): ShopScope {
-    return new ShopScope(this.manager, this.stamp, shopId, ability);
+  forShop(shopId: string, ability?: Ability, timeZone?: string): ShopScope {
+    return new ShopScope(this.manager, this.stamp, shopId, ability, timeZone);
   }
 }
 
@@ -58,6 +58,8 @@ export class ShopScope extends GlobalScope {
     stamp: Stamp,
     readonly shopId: string,
     private readonly granted?: Ability,
+    /** The shop's IANA zone, where it was read with the membership. */
+    readonly timeZone?: string,
   ) {
     super(manager, stamp);
   }

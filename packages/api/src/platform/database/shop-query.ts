@@ -49,6 +49,13 @@ export class ShopQuery {
     );
   }
 
+  /** Joins the shop itself, which is no row of a shop. */
+  joinShop(entity: new () => ObjectLiteral, alias: string): this {
+    return this.note(`join shop ${entity.name} ${alias}`, {}, (builder) =>
+      builder.innerJoin(entity, alias, `${alias}.id = :shopId`),
+    );
+  }
+
   /** Chooses what comes back: output key → `alias.property`, read by the column's own kind, or an SQL expression. */
   pick(columns: Record<string, string>): this {
     for (const [output, path] of Object.entries(columns)) {

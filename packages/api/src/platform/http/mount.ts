@@ -20,13 +20,13 @@ import {
 import { sendAnswer } from './send-answer.js';
 import type { UploadReader } from './uploads.js';
 
+/** What one look-up tells of a member at each request. */
+export type AccessOfMember = { memberId: string; role: Role; readOnly: boolean; timeZone: string };
+
 /** What the platform needs to know of the slices above it, given to it by `compose.ts`. */
 export type Access = {
   /** The member a person is in a shop, or null: read at every request, so that a change of role holds at once. */
-  member(
-    scope: ShopScope,
-    personId: string,
-  ): Promise<{ memberId: string; role: Role; readOnly: boolean } | null>;
+  member(scope: ShopScope, personId: string): Promise<AccessOfMember | null>;
   /** What a customer's link opens, or a refusal thrown. Tries are counted by the network address. */
   link(scope: GlobalScope, token: string, address: string): Promise<ResolvedLink>;
   sessionOf(request: Request): { personId: string | null; control: SessionControl };
@@ -97,7 +97,7 @@ async function enterShop(
   return {
     author: { kind: 'member', personId, memberId: member.memberId, role: member.role },
     ownerId: shopId,
-    open: (scope) => ({ scope: scope.forShop(shopId, ability) }),
+    open: (scope) => ({ scope: scope.forShop(shopId, ability, member.timeZone) }),
   };
 }
 
