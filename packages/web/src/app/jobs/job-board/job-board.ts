@@ -62,7 +62,7 @@ export class JobBoard {
   protected readonly placeOf = placeOf;
   protected readonly reachable = JOB_TRANSITIONS;
   protected readonly assignments = [
-    { value: '', name: 'Everybody’s' },
+    { value: '', name: 'Anybody’s' },
     { value: 'me', name: 'Assigned to me' },
   ];
 

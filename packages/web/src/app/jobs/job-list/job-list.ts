@@ -67,7 +67,7 @@ export class JobList {
     ...JOB_STAGES.map((value) => ({ value, name: JOB_STAGE_NAMES[value] })),
   ];
   protected readonly assignments = [
-    { value: '', name: 'Everybody’s' },
+    { value: '', name: 'Anybody’s' },
     { value: 'me', name: 'Assigned to me' },
   ];
   private readonly floorColumns: readonly Column<JobRow>[] = [
