@@ -62,8 +62,8 @@ export class JobBoard {
   protected readonly placeOf = placeOf;
   protected readonly reachable = JOB_TRANSITIONS;
   protected readonly assignments = [
-    { value: '', name: 'Anybody’s' },
-    { value: 'me', name: 'Assigned to me' },
+    { value: '', name: 'All jobs' },
+    { value: 'me', name: 'My jobs' },
   ];
 
   constructor() {

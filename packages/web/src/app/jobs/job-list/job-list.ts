@@ -67,8 +67,8 @@ export class JobList {
     ...JOB_STAGES.map((value) => ({ value, name: JOB_STAGE_NAMES[value] })),
   ];
   protected readonly assignments = [
-    { value: '', name: 'Anybody’s' },
-    { value: 'me', name: 'Assigned to me' },
+    { value: '', name: 'All jobs' },
+    { value: 'me', name: 'My jobs' },
   ];
   private readonly floorColumns: readonly Column<JobRow>[] = [
     { key: 'title', header: 'Job', sort: 'title', width: '26%' },
