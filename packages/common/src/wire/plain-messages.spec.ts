@@ -12,7 +12,9 @@ const schema = z.strictObject({
 
 function messages(value: unknown): Record<string, string> {
   const parsed = schema.safeParse(value, { error: plainMessage });
-  return Object.fromEntries((parsed.error?.issues ?? []).map(({ path, message }) => [path.join('.'), message]));
+  return Object.fromEntries(
+    (parsed.error?.issues ?? []).map(({ path, message }) => [path.join('.'), message]),
+  );
 }
 
 describe('plain messages', () => {

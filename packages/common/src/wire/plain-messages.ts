@@ -5,7 +5,8 @@ import type * as z from 'zod';
  * types. Given to every parse as its error map; a schema's own message goes before it.
  */
 export function plainMessage(issue: z.core.$ZodRawIssue): string | undefined {
-  if (issue.code === 'invalid_type') return issue.input === undefined ? 'This is needed.' : TYPE_WORDS[issue.expected];
+  if (issue.code === 'invalid_type')
+    return issue.input === undefined ? 'This is needed.' : TYPE_WORDS[issue.expected];
   if (issue.code === 'invalid_value') return 'Choose one of the offered values.';
   if (issue.code === 'invalid_union') return 'This does not have one of the forms it can have.';
   if (issue.code === 'too_small') return `This is less than the smallest allowed, ${String(issue.minimum)}.`;
