@@ -61,7 +61,7 @@ export class DraftSaving {
     });
     inject(DestroyRef).onDestroy(() => {
       clearTimeout(this.timer);
-      if (this.unsent()) this.save();
+      this.flush();
     });
   }
 
@@ -78,6 +78,11 @@ export class DraftSaving {
   /** The server agrees with what was sent last. */
   agree(revision: Revision): void {
     if (!this.refusal()) this.base.set(revision);
+  }
+
+  /** Does not wait for the pause: what was typed goes now. */
+  flush(): void {
+    if (this.unsent()) this.save();
   }
 
   /** Sends what stands on the screen, if it can be sent. */

@@ -107,7 +107,7 @@ export class EstimatePage implements HasUnsavedChanges {
 
   /** What is on the screen goes to the server first: pages and letters show what is kept. */
   protected flush(): void {
-    this.builder()?.saving.save();
+    this.builder()?.saving.flush();
   }
 
   protected send({ id: estimateId }: Estimate): void {

@@ -78,9 +78,6 @@ export class RevisionPage {
 
   protected load(): void {
     const revision = { estimateId: this.id(), revisionId: this.revisionId() };
-    untracked(() => {
-      this.store.dispatch(EstimatesPage.estimateOpened({ id: revision.estimateId }));
-      this.store.dispatch(EstimatesPage.revisionOpened({ revision }));
-    });
+    untracked(() => this.store.dispatch(EstimatesPage.revisionOpened({ revision })));
   }
 }

@@ -28,8 +28,9 @@ export const loadList = createEffect(
 export const loadEstimate = createEffect(
   (actions$ = inject(Actions), api = inject(EstimatesApiClient)) =>
     actions$.pipe(
-      ofType(EstimatesPage.estimateOpened),
-      switchMap(({ id }) =>
+      ofType(EstimatesPage.estimateOpened, EstimatesPage.revisionOpened),
+      map((action) => ('revision' in action ? action.revision.estimateId : action.id)),
+      switchMap((id) =>
         api.read(id).pipe(
           map((estimate) => EstimatesApi.estimateLoaded({ estimate })),
           catchProblem((problem) => EstimatesApi.estimateFailed({ problem })),

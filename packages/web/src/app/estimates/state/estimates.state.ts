@@ -69,7 +69,10 @@ export const estimatesFeature = createFeature({
       ...withEstimate(state, estimate),
       create: saved,
     })),
-    on(EstimatesPage.estimateOpened, (state): EstimatesState => ({ ...state, openProblem: null })),
+    on(EstimatesPage.estimateOpened, EstimatesPage.revisionOpened, (state): EstimatesState => ({
+      ...state,
+      openProblem: null,
+    })),
     on(EstimatesApi.estimateFailed, (state, { problem }): EstimatesState => ({
       ...state,
       openProblem: problem,
