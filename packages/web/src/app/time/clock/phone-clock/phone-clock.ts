@@ -3,8 +3,8 @@ import {
   ChangeDetectionStrategy,
   Component,
   computed,
-  DOCUMENT,
   effect,
+  ElementRef,
   inject,
   input,
   untracked,
@@ -56,7 +56,7 @@ export class PhoneClock {
   protected readonly face = inject(ClockFace);
   private readonly store = inject(Store);
   private readonly dialog = inject(MatDialog);
-  private readonly window = inject(DOCUMENT).defaultView;
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
   private readonly narrow = toSignal(
     inject(BreakpointObserver)
       .observe('(max-width: 599px)')
@@ -82,7 +82,7 @@ export class PhoneClock {
   /** The card stands at the top: what became of the touch is seen at once, wherever in the list it was. */
   protected clockIn(work: PunchedWork): void {
     this.face.clockIn(work, this.narrow() ? 'phone' : 'desk');
-    this.window?.scrollTo({ top: 0 });
+    this.host.scrollIntoView?.();
   }
 
   protected otherWork(jobId: string | null = null): void {
