@@ -16,7 +16,7 @@ import { Store } from '@ngrx/store';
 import { checkForm } from '../../ui/form-errors/check-form';
 import { ErrorOf } from '../../ui/form-errors/error-of';
 import { focusFirstInvalid, FormErrors } from '../../ui/form-errors/form-errors';
-import { DayInput } from '../day-input/day-input';
+import { DayInput } from '../../ui/day-input/day-input';
 import { JobsPage } from '../state/jobs.actions';
 import { selectJob, selectSave } from '../state/jobs.selectors';
 

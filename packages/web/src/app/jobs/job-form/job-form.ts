@@ -37,7 +37,7 @@ import { MoneyInput } from '../../ui/money-input/money-input';
 import { PageHead } from '../../ui/page-head/page-head';
 import { Panel } from '../../ui/panel/panel';
 import { warnBeforeUnload, type HasUnsavedChanges } from '../../ui/unsaved-changes/unsaved-changes';
-import { DayInput } from '../day-input/day-input';
+import { DayInput } from '../../ui/day-input/day-input';
 import { JobsApiClient } from '../jobs-api';
 import { JobsPage } from '../state/jobs.actions';
 import { selectSave } from '../state/jobs.selectors';

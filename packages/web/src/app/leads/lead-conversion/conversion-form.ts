@@ -8,7 +8,7 @@ export function conversionForm(builder: NonNullableFormBuilder, lead: Lead) {
   const { street, city } = lead.siteAddress;
   return builder.group({
     who: builder.control<'new' | 'known'>('new'),
-    customerId: builder.control<string | null>(null),
+    customerId: '',
     customer: builder.group({
       kind: builder.control<CustomerKind>(KIND_OF_SOURCE[lead.source] ?? 'homeowner'),
       name: lead.contactName,
@@ -34,7 +34,7 @@ type Typed = ReturnType<ConversionForm['getRawValue']>;
 
 function conversionOf({ who, customerId, customer, withSite, site }: Typed) {
   return {
-    ...(who === 'new' ? { customer } : { customerId: customerId ?? undefined }),
+    ...(who === 'new' ? { customer } : { customerId: customerId || undefined }),
     ...(withSite ? { site } : {}),
   };
 }

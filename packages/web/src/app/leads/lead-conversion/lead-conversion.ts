@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, viewChild } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { NonNullableFormBuilder, ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
@@ -14,24 +14,23 @@ import { MatError, MatFormField, MatLabel } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
 import { MatRadioButton, MatRadioGroup } from '@angular/material/radio';
 import { MatOption, MatSelect } from '@angular/material/select';
-import { CUSTOMER_KINDS, type CustomerRow } from '@bookmatch/common/customers/customers-contract';
+import { CUSTOMER_KINDS } from '@bookmatch/common/customers/customers-contract';
 import type { Lead } from '@bookmatch/common/leads/leads-contract';
 import { Store } from '@ngrx/store';
-import { AddressFields, CUSTOMER_KIND_NAMES } from '../../customers/customers-public';
+import { AddressFields, CUSTOMER_KIND_NAMES, CustomerChoice } from '../../customers/customers-public';
 import { checkForm } from '../../ui/form-errors/check-form';
 import { ErrorOf } from '../../ui/form-errors/error-of';
 import { focusFirstInvalid, FormErrors } from '../../ui/form-errors/form-errors';
 import { LeadsPage } from '../state/leads.actions';
 import { selectLead, selectSave } from '../state/leads.selectors';
 import { conversionForm, conversionSchema } from './conversion-form';
-import { CustomerSearch } from './customer-search';
 
 /** Makes a customer of a lead, or ties it to one the shop has, with the site the work would go to. */
 @Component({
   selector: 'bm-lead-conversion',
   imports: [
     AddressFields,
-    CustomerSearch,
+    CustomerChoice,
     ErrorOf,
     FormErrors,
     MatButton,
@@ -65,6 +64,8 @@ export class LeadConversion {
   protected readonly who = computed(() => this.typed().who);
   protected readonly withSite = computed(() => this.typed().withSite);
 
+  private readonly customerChoice = viewChild(CustomerChoice);
+
   constructor() {
     this.store.dispatch(LeadsPage.formOpened({ form: 'conversion' }));
     effect(() => {
@@ -72,11 +73,8 @@ export class LeadConversion {
     });
   }
 
-  protected choose(customer: CustomerRow | null): void {
-    this.form.patchValue({ customerId: customer?.id ?? null });
-  }
-
   protected submit(element: HTMLFormElement): void {
+    this.customerChoice()?.touch();
     const conversion = checkForm(this.form, conversionSchema);
     if (conversion) this.store.dispatch(LeadsPage.conversionSubmitted({ lead: this.lead(), conversion }));
     else focusFirstInvalid(element);

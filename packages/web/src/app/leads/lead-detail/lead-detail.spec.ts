@@ -118,7 +118,7 @@ describe('LeadDetail', () => {
     await press('Tie to the customer');
     http.expectNone(shop(`${path}/convert`));
     expect(await (await loader.getHarness(MatDialogHarness)).getText()).toContain(
-      'Choose a customer or make a new one.',
+      'Choose a customer from the list.',
     );
   });
 

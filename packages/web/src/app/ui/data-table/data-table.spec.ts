@@ -40,7 +40,13 @@ type Row = { id: string; name: string; cents: number };
 class Host {
   readonly columns: Column<Row>[] = [
     { key: 'name', header: 'Name', sort: 'name', text: ({ name }) => name },
-    { key: 'cents', header: 'Price', sort: 'price', align: 'end' },
+    {
+      key: 'cents',
+      header: 'Price',
+      sort: 'price',
+      align: 'end',
+      text: ({ cents }) => (cents === 0 ? '' : 'priced'),
+    },
   ];
   readonly rows = signal<Row[]>([
     { id: 'a', name: 'Lockers', cents: 5000 },
@@ -132,5 +138,13 @@ describe('DataTable', () => {
     await table.press('Try again');
     expect(element.querySelector('[role=alert]')?.textContent).toContain('It broke.');
     expect(host.said).toEqual(['retry']);
+  });
+
+  it('leaves a cell without a text out of a narrow row, also when a template draws it', async () => {
+    const { fixture } = await open();
+    fixture.componentInstance.rows.update(([first, ...rest]) => [{ ...first!, cents: 0 }, ...rest]);
+    await fixture.whenStable();
+    const cells = [...(fixture.nativeElement as HTMLElement).querySelectorAll('tbody td.end')];
+    expect(cells.map((cell) => cell.classList.contains('blank'))).toEqual([true, false]);
   });
 });
