@@ -48,7 +48,7 @@ function sumsOf(scope: ShopScope, jobId: string): Promise<Sums[]> {
       minutes: 'coalesce(sum(entry.minutes), 0)',
       costCents: 'cast(coalesce(sum(entry.costCents), 0) as signed)',
     })
-    .where('entry.jobId = :jobId and entry.voidedAt is null and entry.endedAt is not null', { jobId })
+    .where('entry.jobId = :jobId and entry.voidedAt is null and entry.minutes is not null', { jobId })
     .groupBy('entry.operationId')
     .all<Sums>();
 }

@@ -17,30 +17,33 @@ export const seesTimeMoney = (scope: ShopScope): boolean => scope.can('read', 'T
 
 /** Entries with the names of what they point at, beside the alias `entry`. */
 export function entryQuery(scope: ShopScope): ShopQuery {
-  return scope
-    .query(TimeEntry, 'entry')
-    .join(Member, 'member', 'member.id = entry.memberId')
-    .leftJoin(Job, 'job', 'job.id = entry.jobId')
-    .leftJoin(Operation, 'operation', 'operation.id = entry.operationId')
-    .pick({
-      id: 'entry.id',
-      version: 'entry.version',
-      memberId: 'entry.memberId',
-      memberName: '(select person.name from person where person.id = member.person_id)',
-      jobId: 'entry.jobId',
-      jobNumber: 'job.number',
-      jobTitle: 'job.title',
-      operationId: 'entry.operationId',
-      operationName: 'operation.name',
-      kind: 'entry.kind',
-      startedAt: 'entry.startedAt',
-      endedAt: 'entry.endedAt',
-      minutes: 'entry.minutes',
-      note: 'entry.note',
-      source: 'entry.source',
-      corrected: 'entry.corrected',
-      voidedAt: 'entry.voidedAt',
-    });
+  return (
+    scope
+      .query(TimeEntry, 'entry')
+      // None of these joins takes a row away: where only rows are counted, the database leaves them out.
+      .leftJoin(Member, 'member', 'member.id = entry.memberId')
+      .leftJoin(Job, 'job', 'job.id = entry.jobId')
+      .leftJoin(Operation, 'operation', 'operation.id = entry.operationId')
+      .pick({
+        id: 'entry.id',
+        version: 'entry.version',
+        memberId: 'entry.memberId',
+        memberName: '(select person.name from person where person.id = member.person_id)',
+        jobId: 'entry.jobId',
+        jobNumber: 'job.number',
+        jobTitle: 'job.title',
+        operationId: 'entry.operationId',
+        operationName: 'operation.name',
+        kind: 'entry.kind',
+        startedAt: 'entry.startedAt',
+        endedAt: 'entry.endedAt',
+        minutes: 'entry.minutes',
+        note: 'entry.note',
+        source: 'entry.source',
+        corrected: 'entry.corrected',
+        voidedAt: 'entry.voidedAt',
+      })
+  );
 }
 
 /** The same with costs, for who may see them. */

@@ -19,24 +19,24 @@ export function openEntryOf(scope: ShopScope, memberId: string): Promise<TimeEnt
 
 /**
  * The member's other entries, voided ones left out, that may share time with a stretch. A closed entry is at most 16
- * hours long, so that those which began earlier need not be looked at.
+ * hours long, so that those which began earlier need not be looked at; an open one may have begun at any time.
  */
 export async function neighborsOf(
   scope: ShopScope,
   memberId: string,
-  stretch: Neighborhood,
+  { from, to, except }: Neighborhood,
 ): Promise<Span[]> {
-  const { from, to, except } = stretch;
   const query = scope
     .query(TimeEntry, 'entry')
-    .pick({ startedAt: 'entry.startedAt', endedAt: 'entry.endedAt' })
+    .pick({ id: 'entry.id', startedAt: 'entry.startedAt', endedAt: 'entry.endedAt' })
     .where('entry.memberId = :memberId and entry.voidedAt is null', { memberId })
-    .where('entry.endedAt >= :from or entry.openMemberId is not null', { from })
-    .where('entry.startedAt >= :since or entry.openMemberId is not null', { since: earliest(from) });
+    .where('entry.startedAt >= :since and entry.endedAt >= :from', { since: earliest(from), from });
   if (to !== null) query.where('entry.startedAt <= :to', { to });
-  if (except.length > 0) query.where('entry.id not in (:...except)', { except });
-  return (await query.all<{ startedAt: Date; endedAt: Date | null }>()).map(spanOf);
+  const closed = await query.all<Neighbor>();
+  const open = await openEntryOf(scope, memberId);
+  return [...closed, ...(open ? [open] : [])].filter((entry) => !except.includes(entry.id)).map(spanOf);
 }
+type Neighbor = { id: string; startedAt: Date; endedAt: Date };
 export type Neighborhood = { from: Date; to: Date | null; except: readonly string[] };
 
 export function spanOf({ startedAt, endedAt }: { startedAt: Date; endedAt: Date | null }): Span {
