@@ -86,6 +86,8 @@ export class PhoneClock {
   }
 
   protected otherWork(jobId: string | null = null): void {
+    // A job may have begun since this screen was opened; without a network the known ones stand.
+    this.store.dispatch(ClockPage.jobsWanted());
     const data: OtherWorkQuestion = { jobId };
     this.dialog
       .open<OtherWork, OtherWorkQuestion, PunchedWork>(OtherWork, {
