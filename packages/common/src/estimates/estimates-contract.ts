@@ -130,3 +130,7 @@ export const estimateListQuerySchema = listQuerySchema(ESTIMATE_SORT_KEYS).exten
   leadId: idSchema.optional(),
 });
 export type EstimateListQuery = z.infer<typeof estimateListQuerySchema>;
+
+/** The whole list as a file, with the list's own filters and order. */
+export const estimateExportQuerySchema = estimateListQuerySchema.omit({ after: true, limit: true });
+export type EstimateExportQuery = z.infer<typeof estimateExportQuerySchema>;

@@ -4,6 +4,7 @@ import {
   createRevisionSchema,
   declineEstimateSchema,
   duplicateEstimateSchema,
+  estimateExportQuerySchema,
   estimateListQuerySchema,
   estimatePageSchema,
   estimateSchema,
@@ -12,6 +13,7 @@ import {
 } from '@bookmatch/common/estimates/estimates-contract';
 import { revisionSchema, saveRevisionSchema } from '@bookmatch/common/estimates/revision-contract';
 import { shopRoute, type Route } from '../../platform/http/route.js';
+import { exportEstimates } from './estimate-export.js';
 import { listEstimates } from './estimate-lists.js';
 import { estimatePdf } from './estimate-pdf.js';
 import type { EstimateQuestions } from './estimate-questions.js';
@@ -48,6 +50,14 @@ function estimateRoutes(estimates: EstimatesService): Route[] {
       answer: estimateSchema,
       status: 201,
       handle: ({ scope, body }) => estimates.create(scope, body),
+    }),
+    shopRoute({
+      method: 'get',
+      path: '/estimates/export',
+      summary: 'Download the list of estimates as CSV',
+      allow: ['read', 'Estimate'],
+      query: estimateExportQuerySchema,
+      handle: async ({ scope, query }) => exportEstimates(scope, query),
     }),
     shopRoute({
       method: 'get',

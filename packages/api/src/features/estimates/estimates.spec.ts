@@ -231,6 +231,18 @@ describe('estimates', () => {
     expect(rows).toMatchObject([{ status: 'expired', totalCents: 566_155, openQuestions: 0 }]);
   });
 
+  it('downloads the list as it is filtered, formulas neutralized', async () => {
+    const other = await api.signUp();
+    await priceEstimate(other.owner, { title: '=1+1' });
+    await startEstimate(other.owner, { title: 'Another' });
+    const file = await other.owner.get('/estimates/export', { q: '=1' });
+    expect(file.type).toBe('text/csv');
+    const lines = file.text.trim().split('\r\n');
+    expect(lines).toHaveLength(2);
+    expect(lines[1]).toContain("'=1+1");
+    expect(lines[1]).toContain('5661.55');
+  });
+
   it('lets the owner write, the bookkeeper read, and the floor see nothing', async () => {
     const estimate = await priceEstimate(shop.owner);
     const address = `/estimates/${estimate.id}`;

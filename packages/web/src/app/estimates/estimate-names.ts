@@ -3,14 +3,6 @@ import type { RevisionStatus } from '@bookmatch/common/estimates/revision-contra
 import type { TaxRule } from '@bookmatch/common/estimates/tax-rules';
 import type { Tone } from '../ui/status-chip/status-chip';
 
-export const ESTIMATE_STATUS_NAMES: Record<EstimateStatus, string> = {
-  draft: 'Draft',
-  sent: 'Sent',
-  accepted: 'Accepted',
-  declined: 'Declined',
-  expired: 'Expired',
-};
-
 export const ESTIMATE_STATUS_TONES: Record<EstimateStatus, Tone> = {
   draft: 'neutral',
   sent: 'planned',

@@ -25,6 +25,7 @@ import { operationsSchema, type Operation } from '@bookmatch/common/shops/operat
 import type { Page, Rows } from '@bookmatch/common/wire/list';
 import type { Observable } from 'rxjs';
 import { ApiClient } from '../platform/api/api-client';
+import { withQuery } from '../platform/api/query-params';
 import type { ListQuery } from '../platform/lists/list-address';
 import { injectShopUrl } from '../platform/session/current-shop';
 
@@ -41,6 +42,11 @@ export class EstimatesApiClient {
 
   list(query: ListQuery): Observable<Page<EstimateRow>> {
     return this.api.get(this.shopUrl('/estimates'), { answer: estimatePageSchema, query });
+  }
+
+  /** Where the list downloads as CSV. */
+  csvUrl({ after: _after, ...query }: ListQuery): string {
+    return withQuery(this.shopUrl('/estimates/export'), query);
   }
 
   read(id: string): Observable<Estimate> {

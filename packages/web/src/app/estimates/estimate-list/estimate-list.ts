@@ -1,7 +1,8 @@
-import { ChangeDetectionStrategy, Component, effect, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { MatIcon } from '@angular/material/icon';
 import { RouterLink } from '@angular/router';
+import { ESTIMATE_STATUS_NAMES } from '@bookmatch/common/estimates/estimate-words';
 import { ESTIMATE_STATUSES, type EstimateRow } from '@bookmatch/common/estimates/estimates-contract';
 import { Store } from '@ngrx/store';
 import { injectListAddress } from '../../platform/lists/list-address';
@@ -16,7 +17,8 @@ import { MoneyPipe } from '../../ui/formats/money.pipe';
 import { PageHead } from '../../ui/page-head/page-head';
 import { SearchField } from '../../ui/search-field/search-field';
 import { StatusChip } from '../../ui/status-chip/status-chip';
-import { counted, ESTIMATE_STATUS_NAMES, ESTIMATE_STATUS_TONES } from '../estimate-names';
+import { counted, ESTIMATE_STATUS_TONES } from '../estimate-names';
+import { EstimatesApiClient } from '../estimates-api';
 import { EstimatesPage } from '../state/estimates.actions';
 import { selectEstimateList } from '../state/estimates.selectors';
 
@@ -41,6 +43,7 @@ import { selectEstimateList } from '../state/estimates.selectors';
 })
 export class EstimateList {
   private readonly store = inject(Store);
+  private readonly api = inject(EstimatesApiClient);
   protected readonly can = injectCan();
   protected readonly address = injectListAddress('status', 'customerId', 'leadId');
   protected readonly list = this.store.selectSignal(selectEstimateList);
@@ -61,6 +64,7 @@ export class EstimateList {
     { key: 'createdAt', header: 'Started', sort: 'createdAt', phone: 'hidden' },
     { key: 'totalCents', header: 'Price with tax', align: 'end', phone: 'side' },
   ];
+  protected readonly csvUrl = computed(() => this.api.csvUrl(this.address.query()));
   protected readonly linkOf = ({ id }: EstimateRow): string => `/estimates/${id}`;
 
   constructor() {

@@ -1,6 +1,7 @@
 import { Actions } from '@ngrx/effects';
 import type { Action, Store } from '@ngrx/store';
 import { buildEstimate, buildRevision, buildRevisionContent } from '@bookmatch/common/testing/build-estimate';
+import type { Revision } from '@bookmatch/common/estimates/revision-contract';
 import { BehaviorSubject, firstValueFrom, map, of, Subject, throwError, toArray } from 'rxjs';
 import { ApiProblem } from '../../platform/api/api-problem';
 import type { EstimatesApiClient } from '../estimates-api';
@@ -32,11 +33,8 @@ function storeWith(...list: Parameters<typeof estimatesFeature.reducer>[1][]) {
 describe('estimates effects', () => {
   it('saves one draft after the other, each with the version the one before it brought', async () => {
     const { store, dispatch } = storeWith(EstimatesApi.estimateLoaded({ estimate }));
-    const answers = [
-      new Subject<ReturnType<typeof buildRevision>>(),
-      new Subject<ReturnType<typeof buildRevision>>(),
-    ];
-    const saveRevision = jest.fn(() => answers[saveRevision.mock.calls.length - 1]!);
+    const first = new Subject<Revision>();
+    const saveRevision = jest.fn().mockReturnValueOnce(first).mockReturnValueOnce(new Subject<Revision>());
     const edit = EstimatesPage.draftEdited({ draft, content });
     const seen: Action[] = [];
     effects.saveDraft(actions(edit, edit), api({ saveRevision }), store).subscribe((action) => {
@@ -44,8 +42,8 @@ describe('estimates effects', () => {
       dispatch(action as Parameters<typeof dispatch>[0]);
     });
     expect(saveRevision).toHaveBeenCalledTimes(1);
-    answers[0]!.next(buildRevision({ id: draft.revisionId, version: 2 }));
-    answers[0]!.complete();
+    first.next(buildRevision({ id: draft.revisionId, version: 2 }));
+    first.complete();
     expect(saveRevision).toHaveBeenCalledTimes(2);
     expect(saveRevision).toHaveBeenNthCalledWith(1, draft, 1, content);
     expect(saveRevision).toHaveBeenNthCalledWith(2, draft, 2, content);
