@@ -20,6 +20,10 @@ export async function signIn(origin: string, email: string, password: string): P
 }
 
 function cookiesOf(answer: Response): Record<string, string> {
-  const pairs = answer.headers.getSetCookie().map((line) => /^([^=]+)=([^;]*)/.exec(line));
-  return Object.fromEntries(pairs.filter((pair) => pair !== null).map(([, name, value]) => [name, value]));
+  const cookies: Record<string, string> = {};
+  for (const line of answer.headers.getSetCookie()) {
+    const [, name = '', value = ''] = /^([^=]+)=([^;]*)/.exec(line) ?? [];
+    cookies[name] = value;
+  }
+  return cookies;
 }
