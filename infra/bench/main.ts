@@ -39,8 +39,10 @@ const origin = env['BOOKMATCH_ORIGIN'] ?? '';
 const api = await startServer(file('../../../packages/api/dist/main.js'), {}, `${origin}/api/ready`);
 try {
   const cookies = new Map<string, string>();
-  for (const { role, email, password } of signIns)
+  for (const { role: title, email, password } of signIns) {
+    const role = title.toLowerCase().replace(' ', '-');
     if (!cookies.has(role)) cookies.set(role, await signIn(origin, email, password));
+  }
   const owner = cookies.get('owner') ?? '';
   console.log(await compareWithBare(api, bare, small, owner));
   console.log(await routesOfTheLargeShop(api, large, cookies));
