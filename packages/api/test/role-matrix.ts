@@ -51,6 +51,7 @@ export const ROLE_MATRIX: Readonly<Record<string, readonly Role[]>> = {
   'POST /leads/:id/convert': OWNER,
   'POST /leads/:id/estimates': OWNER,
   'GET /estimates': OFFICE,
+  'GET /estimates/export': OFFICE,
   'POST /estimates': OWNER,
   'GET /estimates/:id': OFFICE,
   'PATCH /estimates/:id': OWNER,
