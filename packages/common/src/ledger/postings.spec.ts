@@ -3,7 +3,14 @@ import { INVOICE_KINDS, PAYMENT_METHODS } from '../invoices/invoice-standings.js
 import { accountBalance, assertBalanced, trialBalance } from './balance.js';
 import { CHART_OF_ACCOUNTS, type AccountCode } from './chart-of-accounts.js';
 import type { LedgerLine } from './ledger-contract.js';
-import { postCreditNote, postDepositEarned, postInvoice, postPayment } from './postings.js';
+import {
+  postCreditNote,
+  postDepositEarned,
+  postInvoice,
+  postPayment,
+  postRefund,
+  postReversal,
+} from './postings.js';
 
 const party = { customerId: '01930000-0000-7000-8000-000000000001', jobId: null };
 const brief = (lines: LedgerLine[]) =>
@@ -52,6 +59,20 @@ describe('postings', () => {
       'debit 1000 100',
       'debit 1000 100',
     ]);
+  });
+
+  it('owe back what came beyond the debt, until it is given back', () => {
+    const lines = postPayment('card', 10_000, party, 6_000);
+    expect(brief(lines)).toEqual(['debit 1050 10000', 'credit 1200 4000', 'credit 2350 6000']);
+    expect(brief(postRefund('check', 6_000, party))).toEqual(['debit 2350 6000', 'credit 1000 6000']);
+    expect(brief(postPayment('card', 10_000, party, 10_000))).toEqual([
+      'debit 1050 10000',
+      'credit 2350 10000',
+    ]);
+  });
+
+  it('owe a payment again that was recorded wrongly', () => {
+    expect(balances([...postPayment('cash', 100, party), ...postReversal('cash', 100, party)])).toEqual({});
   });
 
   it('take back a sale as an allowance, and an unearned deposit as the liability it was', () => {
