@@ -14,6 +14,8 @@ export default defineConfig({
   use: {
     baseURL: process.env['BOOKMATCH_E2E_ADDRESS'],
     viewport: { width: 1360, height: 900 },
+    actionTimeout: 20_000,
+    navigationTimeout: 30_000,
     locale: 'en-US',
     timezoneId: 'America/Chicago',
     // A journey must see what the server says, not what an earlier one left in a cache.

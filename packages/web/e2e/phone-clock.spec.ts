@@ -1,17 +1,18 @@
-import { expect, test, type Locator, type Page } from '@playwright/test';
+import { expect, test, type Page } from '@playwright/test';
 import { expectAccessible } from './support/accessible';
 import { run } from './support/errand';
+import { clockIn, clockOn, clockOut } from './support/phone-clock';
 import { invite, join, phone, shopRoot, signUp, somebody } from './support/people';
-import { addJob, operationNames } from './support/workplace';
+import { addJob } from './support/workplace';
 
 type Entry = { operationName: string; endedAt: string | null };
 const GLOVE_PX = 56;
+const [first, second, third] = ['Cut sheet goods', 'Face frames', 'Assemble boxes'] as const;
 
 test('a day on the phone, with and without a network', async ({ page, browser }) => {
   const tamsin = somebody('Tamsin Rook');
   await signUp(page, { shop: 'Copperbeech Cabinets', ...somebody('Aldo Reyes') });
-  const [first, second, third] = await operationNames(page);
-  const hours = { [first as string]: 6, [second as string]: 4, [third as string]: 2 };
+  const hours = { [first]: 6, [second]: 4, [third]: 2 };
   await addJob(page, { title: 'Boot room lockers', customer: 'Piers Alder', hours });
   await invite(page, tamsin, 'Crew');
   const hand = await phone(browser);
@@ -19,11 +20,9 @@ test('a day on the phone, with and without a network', async ({ page, browser })
 
   await test.step('clock in and switch', async () => {
     await hand.getByRole('link', { name: 'Clock', exact: true }).click();
-    await expect(clock(hand)).toContainText('Not clocked in');
-    await pick(hand, 'Boot room lockers', first as string);
-    await expect(clock(hand)).toContainText(first as string);
-    await pick(hand, 'Boot room lockers', second as string);
-    await expect(clock(hand)).toContainText(second as string);
+    await expect(clockOn(hand)).toContainText('Not clocked in');
+    await clockIn(hand, 'Boot room lockers', first);
+    await clockIn(hand, 'Boot room lockers', second);
     await expect.poll(() => worked(page)).toEqual([`${first}, ended`, `${second}, runs`]);
     await expectAccessible(hand, 'the phone clock');
     await expectGloveSized(hand);
@@ -31,11 +30,9 @@ test('a day on the phone, with and without a network', async ({ page, browser })
 
   await test.step('no network: clock out, and in to something else', async () => {
     await hand.context().setOffline(true);
-    await clock(hand).getByRole('button', { name: 'Clock out' }).click();
+    await clockOut(hand);
     await expect(hand.getByText('No network. 1 punch is kept on this device')).toBeVisible();
-    await expect(clock(hand)).toContainText('Not clocked in');
-    await pick(hand, 'Boot room lockers', third as string);
-    await expect(clock(hand)).toContainText(third as string);
+    await clockIn(hand, 'Boot room lockers', third);
     await expect(hand.getByText('No network. 2 punches are kept on this device')).toBeVisible();
     await expectGloveSized(hand);
     expect(await worked(page)).toEqual([`${first}, ended`, `${second}, runs`]);
@@ -47,7 +44,7 @@ test('a day on the phone, with and without a network', async ({ page, browser })
     await hand.context().setOffline(false);
     await hand.reload();
     await expect(hand.getByText('2 punches are kept on this device')).toBeVisible();
-    await expect(clock(hand)).toContainText(third as string);
+    await expect(clockOn(hand)).toContainText(third);
     expect(await worked(page)).toEqual([`${first}, ended`, `${second}, runs`]);
     await hand.unroute(punches);
   });
@@ -57,23 +54,11 @@ test('a day on the phone, with and without a network', async ({ page, browser })
     await hand.context().setOffline(false);
     await expect.poll(() => worked(page)).toEqual([`${first}, ended`, `${second}, ended`, `${third}, runs`]);
     await expect(hand.getByText('kept on this device')).toHaveCount(0);
-    await expect(clock(hand)).toContainText(third as string);
-    await clock(hand).getByRole('button', { name: 'Clock out' }).click();
-    await expect(clock(hand)).toContainText('Not clocked in');
+    await expect(clockOn(hand)).toContainText(third);
+    await clockOut(hand);
     await expect.poll(() => worked(page)).toEqual([`${first}, ended`, `${second}, ended`, `${third}, ended`]);
   });
 });
-
-const clock = (hand: Page): Locator => hand.getByRole('region', { name: 'The clock' });
-
-/** By the way that always works: the job first, then what is done on it. */
-async function pick(hand: Page, job: string, operation: string): Promise<void> {
-  await hand.getByRole('button', { name: 'Another job or operation' }).click();
-  const dialog = hand.getByRole('dialog');
-  await dialog.getByRole('button', { name: job }).click();
-  await dialog.getByRole('button', { name: operation }).click();
-  await expect(dialog).toBeHidden();
-}
 
 /** What the server has, oldest first: its list begins with the newest. */
 async function worked(owner: Page): Promise<string[]> {

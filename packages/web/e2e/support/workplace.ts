@@ -22,9 +22,3 @@ export async function addJob(owner: Page, { title, customer, hours, priceCents }
   });
   return id;
 }
-
-/** The names of the shop's operations, in the order of the work. */
-export async function operationNames(owner: Page): Promise<string[]> {
-  const { rows } = await run<{ rows: Operation[] }>(owner, '/operations');
-  return rows.filter(({ onJob }) => onJob).map(({ name }) => name);
-}
