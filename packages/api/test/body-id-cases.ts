@@ -185,7 +185,15 @@ export const BODY_ID_CASES: Readonly<Record<string, BodyIdCase>> = {
             from: 'lines',
             customerId: pick(own, other, field, 'customerId', 'customer'),
             jobId: pick(own, other, field, 'jobId', 'job'),
-            lines: [{ id: randomUUID(), description: 'Repair', quantity: '1', unitPriceCents: 5_000, taxable: true }],
+            lines: [
+              {
+                id: randomUUID(),
+                description: 'Repair',
+                quantity: '1',
+                unitPriceCents: 5_000,
+                taxable: true,
+              },
+            ],
             taxRate: '0',
             memo: '',
           },
