@@ -17,7 +17,12 @@ export default {
       },
     ],
   },
+  // Modules that Node loads and Jest's CommonJS does not: they are turned into it.
+  transformIgnorePatterns: [
+    '/node_modules/(?!(?:file-type|strtok3|token-types|uint8array-extras|@tokenizer/[^/]+|@borewit/text-codec)/)',
+  ],
   moduleNameMapper: {
+    '^@bookmatch/api/(.*)$': '<rootDir>/../packages/api/src/$1',
     '^@bookmatch/common/(.*)$': '<rootDir>/../packages/common/src/$1',
     '^(\\.{1,2}/.*)\\.js$': '$1',
   },
