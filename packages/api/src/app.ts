@@ -14,6 +14,8 @@ import { problemHandler } from './platform/http/problem-handler.js';
 import type { Route } from './platform/http/route.js';
 import { mountWebFiles } from './platform/http/web-files.js';
 import type { Logger } from './platform/log/logger.js';
+import { maskedUrl } from './platform/log/masked-url.js';
+import { safeError } from './platform/log/safe-error.js';
 import { LONGEST_MS, type SessionStore } from './platform/sessions/session-store.js';
 import type { DataSource } from 'typeorm';
 
@@ -69,13 +71,11 @@ function requestLog(log: Logger) {
     quietReqLogger: true,
     autoLogging: { ignore: (request) => request.url === '/api/health' || request.url === '/api/ready' },
     serializers: {
+      err: safeError,
       req: (request: { id: string; method: string; url: string }) => ({
         id: request.id,
         method: request.method,
-        // A customer's link is a secret: it does not go into the log.
-        url: request.url
-          .replace(/\/(api\/links|c)\/[^/?]+/, '/$1/[masked]')
-          .replace(/token=[^&]+/, 'token=[masked]'),
+        url: maskedUrl(request.url),
       }),
       res: (response: { statusCode: number }) => ({ status: response.statusCode }),
     },

@@ -1,6 +1,7 @@
 import { PROBLEMS, type Problem } from '@bookmatch/common/problems/problem';
 import type { ErrorRequestHandler, Response } from 'express';
 import type { Logger } from '../log/logger.js';
+import { maskedUrl } from '../log/masked-url.js';
 import { ProblemError } from './problem-error.js';
 import { isProviderDown } from '../payments/provider-down.js';
 import { isBrokenReference, isDuplicateKey } from '../database/retry.js';
@@ -15,7 +16,7 @@ export function problemHandler(log: Logger): ErrorRequestHandler {
     const problem = toProblem(error);
     const reference = String(request.id);
     if (problem.code === 'fault')
-      log.error({ err: error, requestId: reference, url: request.originalUrl }, 'fault');
+      log.error({ err: error, requestId: reference, url: maskedUrl(request.originalUrl) }, 'fault');
     sendProblem(response, problem, reference);
   };
 }
