@@ -55,8 +55,9 @@ export class InvoiceDrafts {
       ...(await this.amountsAfter(scope, invoice, lines, taxRate)),
     };
     const changed = await rows.update(invoice, patch, version);
-    if (lines) await saveLines(scope, id, lines);
-    return changed;
+    const linesChanged = lines !== undefined && (await saveLines(scope, id, lines));
+    // Lines that come to the same sum leave the invoice's own row as it was.
+    return linesChanged && changed.version === version ? rows.touch(changed) : changed;
   }
 
   /** @throws stale-version, conflict */

@@ -82,6 +82,22 @@ describe('invoices', () => {
       expect((await shop.owner.send('patch', `/invoices/${draft.id}`, { memo: 'x' })).status).toBe(428);
     });
 
+    it('does not let two edits of one version both go through, also where the sum stays the same', async () => {
+      const draft = await books.draft();
+      const [{ amountCents: _, ...line }] = draft.lines as [(typeof draft.lines)[0]];
+      const edit = (description: string, version: number) =>
+        shop.owner.patch(`/invoices/${draft.id}`, { lines: [{ ...line, description }] }, version);
+      const first = await edit('Two drawers', draft.version);
+      expect(first.body).toMatchObject({ version: draft.version + 1, totalCents: draft.totalCents });
+      expect((await edit('A shelf', draft.version)).status).toBe(412);
+      expect(
+        (await shop.owner.post(`/invoices/${draft.id}/issue`, {}, { version: draft.version })).status,
+      ).toBe(412);
+      expect((await books.read(draft.id)).lines).toMatchObject([{ description: 'Two drawers' }]);
+      const same = await edit('Two drawers', draft.version + 1);
+      expect(same.body).toMatchObject({ version: draft.version + 1 });
+    });
+
     it('does not take over a line of another invoice', async () => {
       const other = await books.draft();
       const { amountCents: _, ...line } = other.lines[0]!;

@@ -1,6 +1,6 @@
 import type { EntityManager } from 'typeorm';
 import { notFound, ProblemError } from '../http/problem-error.js';
-import { difference, recordChange } from './audit.js';
+import { difference, recordChanges, type Change } from './audit.js';
 import type { EditableRow, ShopRow } from './rows.js';
 import type { Stamp } from './stamp.js';
 import { deleteRow, insertRows, updateRow } from './statements.js';
@@ -61,7 +61,7 @@ export class ShopRepository<Row extends ShopRow> {
     const complete = rows.map((values) => this.complete(values));
     if (complete.length === 0) return [];
     await insertRows(this.manager, this.entity, complete);
-    for (const row of complete) await this.record({ action: 'insert', rowId: row.id, after: row });
+    await this.record(...complete.map((row) => ({ action: 'insert' as const, rowId: row.id, after: row })));
     return complete;
   }
 
@@ -81,6 +81,17 @@ export class ShopRepository<Row extends ShopRow> {
     if (changed !== 1) throw staleVersion(row);
     await this.record({ action: 'update', rowId: row.id, before, after });
     return Object.assign(Object.create(Object.getPrototypeOf(row) as object) as Row, row, after, bookkeeping);
+  }
+
+  /**
+   * Counts a change of what belongs to the row, such as an invoice's lines, as a change of the row: who saw the version
+   * before has not seen it. The change itself stands in the audit rows of what was changed.
+   */
+  async touch(row: Row & EditableRow): Promise<Row> {
+    const bookkeeping = { version: row.version + 1, updatedAt: this.stamp.now };
+    const keys = { ...this.keys(row), version: row.version };
+    if ((await updateRow(this.manager, this.entity, keys, bookkeeping)) !== 1) throw staleVersion(row);
+    return Object.assign(Object.create(Object.getPrototypeOf(row) as object) as Row, row, bookkeeping);
   }
 
   async delete(row: Row, expectedVersion?: number): Promise<void> {
@@ -118,8 +129,8 @@ export class ShopRepository<Row extends ShopRow> {
     return typeof (row as { version?: unknown }).version === 'number';
   }
 
-  private record(change: Parameters<typeof recordChange>[4]): Promise<void> {
-    return recordChange(this.manager, this.metadata, this.shopId, this.stamp, change);
+  private record(...changes: Change[]): Promise<void> {
+    return recordChanges(this.manager, this.metadata, this.shopId, this.stamp, changes);
   }
 
   private get metadata() {
