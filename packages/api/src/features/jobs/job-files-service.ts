@@ -77,8 +77,10 @@ export class JobFilesService {
       );
       return { ...view(row, await memberNames(scope)), alreadyHere: false };
     } catch (error) {
+      // Anything but a refused row may have been committed without our hearing of it: the sweep looks, and decides.
+      if (!isDuplicateKey(error)) throw error;
       await this.removeBytes(scope.shopId, id);
-      const other = isDuplicateKey(error) ? await this.sameContent(scope, jobId, sha256) : null;
+      const other = await this.sameContent(scope, jobId, sha256);
       if (!other) throw error;
       return other;
     }

@@ -141,6 +141,34 @@ describe('the files of a job', () => {
     expect(rows.map(({ action }) => action)).toEqual(['insert', 'delete']);
   });
 
+  /** Carries out the sweep that an upload asked for, as the outbox does an hour later. */
+  const sweepLast = async () => {
+    const [message] = await api.platform.dataSource.query<{ id: string; payload: string }[]>(
+      "select id, payload from outbox_message where kind = 'job-file-sweep' order by id desc limit 1",
+    );
+    const sweep = JSON.parse(message!.payload) as { fileId: string };
+    const inShop = { id: message!.id, shopId: shop.id };
+    await api.product.services.jobFiles.sweep(api.platform.work, api.clock.read(), sweep, inShop);
+  };
+
+  it('keep their bytes when the row was written and the answer of the database got lost', async () => {
+    const { transaction } = api.platform.work;
+    const content = await photo();
+    const lost = jest
+      .spyOn(api.platform.work, 'transaction')
+      .mockImplementationOnce((stamp, work) => api.platform.work.read(stamp, work))
+      .mockImplementationOnce(async (stamp, work) => {
+        await transaction.call(api.platform.work, stamp, work);
+        throw new TypeError('The connection is gone.');
+      });
+    expect((await upload(content)).status).toBe(500);
+    lost.mockRestore();
+    const { id, alreadyHere } = await uploaded(content);
+    await sweepLast();
+    expect(alreadyHere).toBe(true);
+    expect((await shop.owner.get(`/jobs/${jobId}/files/${id}/content`)).status).toBe(200);
+  });
+
   it('leave no bytes behind when the row could not be written, nor when the process died before', async () => {
     const before = (await kept()).length;
     const insert = jest
@@ -149,6 +177,7 @@ describe('the files of a job', () => {
       .mockRejectedValueOnce(new TypeError('The database is gone.'));
     expect((await upload(await photo())).status).toBe(500);
     insert.mockRestore();
+    await sweepLast();
     expect((await kept()).length).toBe(before);
 
     const orphan = '01930000-0000-7000-8000-0000000000ff';
