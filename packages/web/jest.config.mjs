@@ -9,6 +9,8 @@ export default {
   roots: ['<rootDir>/src'],
   setupFilesAfterEnv: ['<rootDir>/jest.setup.ts'],
   testMatch: ['**/*.spec.ts'],
+  // A screen is drawn whole with Material: slow where two workers share two busy cores.
+  testTimeout: 30_000,
   moduleNameMapper: {
     '^@bookmatch/common/(.*)$': '<rootDir>/../common/src/$1',
     '^(\\.{1,2}/.*)\\.js$': '$1',
