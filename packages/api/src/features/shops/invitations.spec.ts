@@ -1,6 +1,8 @@
 import type { Client } from '../../../test/harness/client.js';
 import { letterTo, tokenIn } from '../../../test/harness/letters.js';
 import { PASSWORD, TestApi, type TestShop } from '../../../test/harness/test-api.js';
+import { systemStamp } from '../../platform/database/stamp.js';
+import { openConfirmedAccount } from '../accounts/accounts-public.js';
 
 type Listed = { id: string; email: string; invitedBy: string; expiresAt: string };
 
@@ -163,6 +165,16 @@ describe('invitations', () => {
     expect((await accept(secret, newcomer)).status).toBe(200);
     const old = await api.browser().post('/account/sign-in', { email, password: 'password of mallory' });
     expect(old.status).toBe(401);
+  });
+
+  it('replace no password when the address was confirmed between the look at it and its lock', async () => {
+    const { email } = await shop.join('crew');
+    const { work, clock } = api.platform;
+    const opening = work.transaction(systemStamp('late', clock()), (scope) =>
+      openConfirmedAccount(scope, { email, name: 'Mallory', passwordHash: 'of mallory' }),
+    );
+    await expect(opening).rejects.toMatchObject({ code: 'not-signed-in' });
+    await api.signIn(email);
   });
 
   it('are sent by an owner alone, and of another shop do not exist here', async () => {
