@@ -38,7 +38,8 @@ const POLL_MS = 2_000;
 
 /**
  * Carries out what the outbox holds. Several processes may run one each: a message is claimed with SKIP LOCKED and held
- * for a minute, so a process that dies leaves its messages to the next.
+ * for a minute, so a process that dies leaves its messages to the next. The minute is counted anew when a message's turn
+ * comes: those before it may have taken long.
  */
 export class OutboxWorker {
   private timer: NodeJS.Timeout | undefined;
@@ -88,7 +89,7 @@ export class OutboxWorker {
     for (;;) {
       const messages = await this.claim();
       if (messages.length === 0) return;
-      for (const message of messages) await this.carryOut(message);
+      for (const message of messages) if (await this.stillOurs(message)) await this.carryOut(message);
     }
   }
 
@@ -111,6 +112,13 @@ export class OutboxWorker {
         return messages;
       }),
     );
+  }
+
+  /** Each claim counts one more attempt, so another number means that somebody else took the message over. */
+  private async stillOurs({ id, attempts }: OutboxMessage): Promise<boolean> {
+    const dueAt = new Date(this.clock().getTime() + HOLD_MS);
+    const claimed = { id, attempts: attempts + 1 };
+    return (await updateRow(this.dataSource.manager, OutboxMessage, claimed, { dueAt })) === 1;
   }
 
   private async carryOut(message: OutboxMessage): Promise<void> {
