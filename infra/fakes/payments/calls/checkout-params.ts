@@ -37,6 +37,7 @@ const subscriptionData = fields({
 
 /** Every parameter our product sends when it asks for a checkout page. */
 export const checkoutCreateParams = fields({
+  allowed_payment_method_types: may(list(oneOf('card'))),
   cancel_url: may(url()),
   client_reference_id: may(text(200)),
   customer: may(text()),

@@ -45,6 +45,7 @@ function sessionFrom(desk: Desk, params: CheckoutCreate, lines: Stripe.LineItem[
     amountCents: onTrial ? 0 : lines.reduce((sum, line) => sum + line.amount_total, 0),
     currency: lines[0]?.currency ?? 'usd',
     customer: params.customer ?? null,
+    allowedMethods: params.allowed_payment_method_types ?? null,
     customerEmail: params.customer_email ?? customer?.email ?? null,
     clientReferenceId: params.client_reference_id ?? null,
     metadata: mergeMetadata({}, params.metadata),

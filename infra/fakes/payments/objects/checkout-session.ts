@@ -9,6 +9,7 @@ export interface SessionSource {
   currency: string;
   customer: string | null;
   customerEmail: string | null;
+  allowedMethods: string[] | null;
   clientReferenceId: string | null;
   metadata: Stripe.Metadata;
   successUrl: string;
@@ -56,6 +57,7 @@ function whatIsSold(from: SessionSource) {
 
 function whoPays(from: SessionSource) {
   return {
+    allowed_payment_method_types: from.allowedMethods,
     collected_information: null,
     customer: from.customer,
     customer_account: null,
@@ -92,7 +94,6 @@ function whatIsNotOffered() {
     adaptive_pricing: null,
     after_expiration: null,
     allow_promotion_codes: null,
-    allowed_payment_method_types: null,
     automatic_tax: { enabled: false, liability: null, provider: null, status: null },
     billing_address_collection: null,
     client_secret: null,

@@ -72,6 +72,18 @@ describe('card payments', () => {
     expect(letter?.attachments).toHaveLength(1);
   });
 
+  it('take cards alone, whatever else the shop’s account could be paid by days later', async () => {
+    const invoice = await books.issued();
+    await start(invoice);
+    const [{ session_id: id }] = (await checkouts(invoice)) as [{ session_id: string }];
+    const session = await api.platform.payments.checkout.sessions.retrieve(
+      id,
+      {},
+      { stripeAccount: account },
+    );
+    expect(session.allowed_payment_method_types).toEqual(['card']);
+  });
+
   it('go through card clearing in the books', async () => {
     const apart = new Books(api, await api.signUp());
     await apart.takeCards();

@@ -39,6 +39,8 @@ function sessionOf(
   const metadata = { shopId: invoice.shopId, invoiceId: invoice.id, checkoutId: checkout.id };
   return {
     mode: 'payment',
+    // What is paid by bank debit settles days later, or fails after the page is over: neither is a card payment.
+    allowed_payment_method_types: ['card'],
     line_items: [
       {
         quantity: 1,
