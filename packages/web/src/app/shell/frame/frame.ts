@@ -6,6 +6,7 @@ import { BottomBar } from '../bottom-bar/bottom-bar';
 import { Nav } from '../nav/nav';
 import { OfflineNote } from '../offline-note/offline-note';
 import { PersonMenu } from '../person-menu/person-menu';
+import { injectFindWords } from '../quick-find/find-words';
 import { QuickFindOpener } from '../quick-find/quick-find-opener';
 import { SlotOutlet } from '../slot-outlet';
 import { BANNER_SLOT, CLOCK_SLOT } from '../slots';
@@ -22,6 +23,7 @@ import { focusOnArrival } from './focus-on-arrival';
 })
 export class Frame {
   protected readonly finder = inject(QuickFindOpener);
+  protected readonly findWords = injectFindWords();
   protected readonly readOnly = inject(CurrentShop).readOnly;
   protected readonly clock = inject(CLOCK_SLOT);
   protected readonly banner = inject(BANNER_SLOT);

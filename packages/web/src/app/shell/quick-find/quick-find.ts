@@ -17,6 +17,7 @@ import { quickFindSchema, type Found } from '@bookmatch/common/today/quick-find-
 import { debounceTime } from 'rxjs';
 import { ApiClient } from '../../platform/api/api-client';
 import { injectShopUrl } from '../../platform/session/current-shop';
+import { injectFindWords } from './find-words';
 import { PLACES } from './places';
 
 const TYPING_PAUSE_MS = 200;
@@ -38,6 +39,7 @@ export class QuickFind {
   private readonly injector = inject(Injector);
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
   protected readonly places = PLACES;
+  protected readonly words = injectFindWords();
   protected readonly text = signal('');
   private readonly asked = toSignal(toObservable(this.text).pipe(debounceTime(TYPING_PAUSE_MS)), {
     initialValue: '',
