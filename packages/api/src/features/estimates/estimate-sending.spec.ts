@@ -134,6 +134,11 @@ describe('sending an estimate', () => {
     const about = { subject: 'estimate', subjectId: estimate.id };
     expect((await customer.get('')).status).toBe(200);
     const made = (await shop.owner.post('/links', about)).body as { id: string; url: string };
+    const [{ found }] = await api.platform.dataSource.query<[{ found: string }]>(
+      'select count(*) as found from idempotency_key where locate(?, answer) > 0',
+      [new URL(made.url).pathname],
+    );
+    expect(Number(found)).toBe(0);
     expect(made.url).toMatch(/\/c\/[\w-]{64}$/);
     const byHand = api.browser().below(`/api/links/${made.url.split('/').at(-1) ?? ''}`);
     expect((await byHand.get('')).status).toBe(200);
