@@ -1,10 +1,9 @@
 import type { ShopScope } from '@bookmatch/api/platform/database/scope';
-import { jobOfEstimate } from '@bookmatch/api/features/jobs/jobs-public';
+import { Job, jobOfEstimate } from '@bookmatch/api/features/jobs/jobs-public';
 import { createJobCostSchema } from '@bookmatch/common/jobs/job-costs-contract';
 import {
   createJobSchema,
   updateJobSchema,
-  type Job,
   type JobStage,
   type UpdateJob,
 } from '@bookmatch/common/jobs/jobs-contract';
@@ -79,8 +78,8 @@ export class JobMaker {
     await this.desk.services.jobCosts.reverse(scope, this.trail.id(this.name), costId, reason);
   }
 
-  read(scope: ShopScope): Promise<Job> {
-    return this.desk.services.jobs.get(scope, this.trail.id(this.name));
+  private read(scope: ShopScope): Promise<Job> {
+    return scope.rows(Job).get(this.trail.id(this.name));
   }
 }
 

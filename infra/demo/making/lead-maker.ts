@@ -1,8 +1,8 @@
 import type { ShopScope } from '@bookmatch/api/platform/database/scope';
+import { Lead } from '@bookmatch/api/features/leads/leads-public';
 import {
   createLeadSchema,
   updateLeadSchema,
-  type Lead,
   type LeadSource,
   type LostReason,
   type OpenLeadStage,
@@ -89,7 +89,7 @@ export class LeadMaker {
   }
 
   private read(scope: ShopScope): Promise<Lead> {
-    return this.services.leads.get(scope, this.trail.id(this.name));
+    return scope.rows(Lead).get(this.trail.id(this.name));
   }
 }
 

@@ -16,29 +16,37 @@ export type Change = {
   after?: object;
 };
 
-/** Writes the audit row of one change, in the transaction of the change. */
-export async function recordChange(
+/** Writes the audit rows of changes to one table, in their transaction and as one statement. */
+export async function recordChanges(
   manager: EntityManager,
-  metadata: EntityMetadata,
+  { tableName }: EntityMetadata,
   shopId: string | null,
   stamp: Stamp,
-  change: Change,
+  changes: readonly Change[],
 ): Promise<void> {
-  const { author } = stamp;
-  const entry: Omit<AuditEntry, never> = {
-    id: v7(stamp.now),
-    createdAt: stamp.now,
+  const entries = changes.map((change) => entryOf(tableName, shopId, stamp, change));
+  await insertRows(manager, AuditEntry, entries);
+}
+
+function entryOf(
+  tableName: string,
+  shopId: string | null,
+  { author, requestId, now }: Stamp,
+  { rowId, action, before, after }: Change,
+): Omit<AuditEntry, never> {
+  return {
+    id: v7(now),
+    createdAt: now,
     shopId,
     personId: author.kind === 'member' || author.kind === 'person' ? author.personId : null,
     actor: author.kind,
-    requestId: stamp.requestId,
-    tableName: metadata.tableName,
-    rowId: change.rowId,
-    action: change.action,
-    before: change.before ? visible(change.before) : null,
-    after: change.after ? visible(change.after) : null,
+    requestId,
+    tableName,
+    rowId,
+    action,
+    before: before ? visible(before) : null,
+    after: after ? visible(after) : null,
   };
-  await insertRows(manager, AuditEntry, [entry]);
 }
 
 function visible(values: object): Plain {

@@ -1,6 +1,6 @@
 import type { EntityManager } from 'typeorm';
 import { notFound } from '../http/problem-error.js';
-import { difference, recordChange } from './audit.js';
+import { difference, recordChanges, type Change } from './audit.js';
 import type { GlobalRow } from './rows.js';
 import type { Stamp } from './stamp.js';
 import { addCondition } from './shop-repository.js';
@@ -57,13 +57,13 @@ export class GlobalRepository<Row extends GlobalRow> {
     await this.record({ action: 'delete', rowId: row.id, before: row });
   }
 
-  private record(change: Parameters<typeof recordChange>[4]): Promise<void> {
-    return recordChange(
+  private record(change: Change): Promise<void> {
+    return recordChanges(
       this.manager,
       this.manager.connection.getMetadata(this.entity),
       this.auditShopId,
       this.stamp,
-      change,
+      [change],
     );
   }
 }
