@@ -29,6 +29,8 @@ export class ClockService {
   /** The punch alone, for work that does not look at the clock afterwards. Answers the entry's id. */
   async punchIn(scope: ShopScope, punch: ClockIn): Promise<string> {
     const member = await lockTimeOf(scope, scope.memberId);
+    // Who was removed while the punch waited was clocked out by that, and could never end what begins now.
+    if (member.removedAt !== null) throw notFound();
     const known = await scope.rows(TimeEntry).find(punch.entryId);
     if (known) return own(scope, known).id;
 

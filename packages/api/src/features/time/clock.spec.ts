@@ -3,6 +3,8 @@ import type { TimeEntryRow } from '@bookmatch/common/time/time-contract';
 import type { Client } from '../../../test/harness/client.js';
 import { ClockSteps } from '../../../test/harness/clock-steps.js';
 import { TestApi, type TestShop } from '../../../test/harness/test-api.js';
+import { systemStamp } from '../../platform/database/stamp.js';
+import { Member } from '../shops/shops-public.js';
 
 /** A Wednesday; noon in Chicago. */
 const NOON = '2026-06-03T17:00:00.000Z';
@@ -105,6 +107,20 @@ describe('the clock', () => {
       ),
     );
     expect(new Set(answers.map(({ body }) => (body as { entry: TimeEntryRow }).entry.endedAt)).size).toBe(1);
+  });
+
+  it('begins nothing for somebody who is removed while their punch waits', async () => {
+    const { work, clock } = api.platform;
+    let waiting: Promise<{ status: number }> | undefined;
+    await work.transaction(systemStamp('leaving', clock()), async (scope) => {
+      const members = scope.forShop(shop.id).rows(Member);
+      const member = await members.getForUpdate(crewId);
+      waiting = crew.post('/time/clock-in', steps.punch(jobId, NOON));
+      await new Promise((resolve) => setTimeout(resolve, 500));
+      await members.update(member, { removedAt: scope.now });
+    });
+    expect((await waiting)?.status).toBe(404);
+    expect(await entriesOf(shop.owner, crewId)).toEqual([]);
   });
 
   it('lets the database itself hold one open entry a member', async () => {
