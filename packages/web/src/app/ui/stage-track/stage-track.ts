@@ -36,6 +36,12 @@ export type Stage = { key: string; name: string };
   `,
   styleUrl: './stage-track.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
+  // On a phone it slides sideways: where no stage takes the focus, the track itself does, to be slid by keyboard.
+  host: {
+    '[attr.role]': "still() ? 'group' : null",
+    '[attr.aria-label]': 'still() ? label() : null',
+    '[attr.tabindex]': 'still() ? 0 : null',
+  },
 })
 export class StageTrack {
   readonly label = input('Stages');
@@ -44,6 +50,7 @@ export class StageTrack {
   /** The stages that may be moved to from here; the others are only shown. */
   readonly reachable = input<readonly string[]>([]);
   readonly picked = output<string>();
+  protected readonly still = computed(() => this.reachable().length === 0);
 
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
 
