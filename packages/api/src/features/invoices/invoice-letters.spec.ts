@@ -78,6 +78,15 @@ describe('letters about invoices', () => {
     ]);
   });
 
+  it('thank for no payment that was taken back', async () => {
+    const paid = await books.pay(await books.issued());
+    const { id } = paid.payments[0]!;
+    expect((await send(`/payments/${id}/reverse`, { reason: 'The check bounced.' })).status).toBe(201);
+    const to = 'bounced@customer.test';
+    expect((await send(`/payments/${id}/send`, { to })).status).toBe(409);
+    expect(await api.lettersTo(to)).toEqual([]);
+  });
+
   it('cannot be sent to a customer’s link of a draft', async () => {
     const draft = await books.draft();
     const answer = await send('/links', { subject: 'invoice', subjectId: draft.id });

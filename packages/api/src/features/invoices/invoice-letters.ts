@@ -66,9 +66,14 @@ export class InvoiceLetters {
     });
   }
 
+  /** @throws conflict for what is no payment that came in, and for one that was taken back */
   async sendReceipt(scope: ShopScope, id: string, to: string): Promise<void> {
     const payment = await scope.rows(Payment).get(id);
     if (payment.kind !== 'payment') throw conflict('There is a receipt only for a payment that came in.');
+    // Taking it back locks the invoice first, too.
+    await scope.rows(Invoice).getForUpdate(payment.invoiceId);
+    if (await scope.rows(Payment).findOneBy({ reversesId: id }))
+      throw conflict('This payment was taken back, so there is nothing to thank for.');
     await this.mailReceipt(scope, payment, to);
   }
 
