@@ -88,9 +88,11 @@ describe('guessing passwords', () => {
         await api.platform.dataSource.query('delete from rate_limit');
         const browser = api.browser();
         await browser.get('/openapi.json');
-        const start = performance.now();
+        // This process's own work, since the time on the wall also holds what others do on the machine.
+        const start = process.cpuUsage();
         await browser.post('/account/sign-in', wrong(address));
-        took[kind].push(performance.now() - start);
+        const { user, system } = process.cpuUsage(start);
+        took[kind].push(user + system);
       }
     }
     const median = (times: number[]) => times.sort((a, b) => a - b)[Math.floor(times.length / 2)] ?? 0;
