@@ -84,7 +84,7 @@ describe('CustomerForm', () => {
       .expectOne({ url: shop(path), method: 'GET' })
       .flush({ ...customer, version: 2, company: 'Wren LLC' });
     await fixture.whenStable();
-    expect(element.textContent).toContain('Changed meanwhile: company.');
+    expect(element.textContent).toContain('changed this meanwhile: company.');
     expect(await (await (await field('Phone')).getControl(MatInputHarness))?.getValue()).toBe(
       '(802) 555-0199',
     );

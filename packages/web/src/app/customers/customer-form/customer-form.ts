@@ -81,6 +81,10 @@ export class CustomerForm implements HasUnsavedChanges {
     if (!before || !now || before.version === now.version || this.save().status === 'saved') return null;
     return changedFields(before, now, CUSTOMER_FIELD_LABELS).join(', ');
   });
+  /** The conflict is told with its fields then, and not a second time without them. */
+  protected readonly isTold = computed(
+    () => this.save().problem?.code === 'stale-version' && Boolean(this.changedMeanwhile()),
+  );
 
   constructor() {
     this.store.dispatch(CustomersPage.formOpened());

@@ -98,7 +98,7 @@ describe('LeadForm', () => {
     http.expectOne({ url: shop(path), method: 'PATCH' }).flush(stale, { status: 412, statusText: '' });
     http.expectOne({ url: shop(path), method: 'GET' }).flush({ ...lead, version: 2, company: 'Wren LLC' });
     await fixture.whenStable();
-    expect(element.textContent).toContain('Changed meanwhile: company.');
+    expect(element.textContent).toContain('changed this meanwhile: company.');
     expect(await (await field('phone')).getValue()).toBe('555 0199');
     await press('Save lead');
     const { request } = http.expectOne({ url: shop(path), method: 'PATCH' });

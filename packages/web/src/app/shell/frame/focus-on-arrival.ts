@@ -23,6 +23,7 @@ export function focusOnArrival(selector: string): void {
     )
     .subscribe(() => {
       document.querySelector<HTMLElement>(selector)?.focus({ preventScroll: true });
-      void announcer.announce(title.getTitle());
+      // The router sets the title just after it has said that it arrived.
+      queueMicrotask(() => void announcer.announce(title.getTitle()));
     });
 }

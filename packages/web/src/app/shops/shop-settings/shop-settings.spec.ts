@@ -101,7 +101,7 @@ describe('ShopSettings', () => {
     await fixture.whenStable();
     http.expectOne(shop('/shop')).flush(buildShop({ version: 7, name: 'Northgrain & Co' }));
     await fixture.whenStable();
-    expect(element.textContent).toContain('Changed meanwhile: name.');
+    expect(element.textContent).toContain('changed this meanwhile: name.');
     expect(await (await field('Phone')).getValue()).toBe('555 0199');
     await press('Save settings');
     expect(sent().request.headers.get('If-Match')).toBe('"7"');
