@@ -21,8 +21,8 @@ export function customerInput(contact: Contact): CreateCustomer {
 }
 
 export function siteInput({ address, company }: Contact): SiteFields {
-  const name = company === '' ? address.street : company;
-  return siteFieldsSchema.parse({ name, address, notes: SITE_NOTES[name.length % SITE_NOTES.length] });
+  const notes = SITE_NOTES[address.street.length % SITE_NOTES.length];
+  return siteFieldsSchema.parse({ name: company === '' ? 'Home' : company, address, notes });
 }
 const SITE_NOTES = [
   'Park in the alley. Dog is friendly.',

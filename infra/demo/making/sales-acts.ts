@@ -37,7 +37,7 @@ export function sellJob(telling: Telling, project: Project, road: Road, random: 
 
 function followLead(
   { desk, trail, list, when, cast }: Telling,
-  { key, title, contact, work }: Project,
+  { key, title, contact, work, acceptedOn }: Project,
   source: LeadSource,
   road: Road,
   estimate: EstimateMaker,
@@ -65,6 +65,7 @@ function followLead(
   list.add(road.sentOn, 16, cast.owner, (scope) =>
     lead.plan(scope, { step: 'Ask whether there are questions', on: when.date(road.sentOn + 4) }),
   );
+  list.add(acceptedOn, 10, cast.owner, (scope) => lead.plan(scope, null));
 }
 
 /** Written, sent, asked about, and sent again where the first offer was changed. */

@@ -200,7 +200,7 @@ export const INQUIRIES: readonly Inquiry[] = [
     },
   }),
   inquiry(
-    -25,
+    -20,
     'Vanity with makeup table',
     'walk-in',
     'estimating',
