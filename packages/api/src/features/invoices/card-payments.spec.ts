@@ -75,9 +75,9 @@ describe('card payments', () => {
   it('take cards alone, whatever else the shop’s account could be paid by days later', async () => {
     const invoice = await books.issued();
     await start(invoice);
-    const [{ session_id: id }] = (await checkouts(invoice)) as [{ session_id: string }];
+    const [checkout] = await checkouts(invoice);
     const session = await api.platform.payments.checkout.sessions.retrieve(
-      id,
+      checkout?.session_id ?? '',
       {},
       { stripeAccount: account },
     );
