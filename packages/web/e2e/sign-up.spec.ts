@@ -12,6 +12,7 @@ test('a stranger opens a shop, adds a customer and comes back', async ({ page })
 
   await page.getByRole('link', { name: 'Customers' }).first().click();
   await expect(page.getByRole('heading', { name: 'Customers', level: 1 })).toBeVisible();
+  await expect(page.locator('.cdk-live-announcer-element')).toHaveText('Customers · Quarry Road Cabinets');
   await expectAccessible(page, 'no customers yet');
   await page.getByRole('link', { name: 'Add the first customer' }).click();
   await page.getByLabel('Name', { exact: true }).fill('<b>Ines</b> Calder');
