@@ -5,7 +5,7 @@ import { rootFolder } from './places.mjs';
 import { readJson } from './private-file.mjs';
 
 const node = process.execPath;
-const limitMs = 10 * 60_000;
+const limitMs = 20 * 60_000;
 
 /** The script of an installed npm package, by its path in node_modules. */
 export function tool(path) {
