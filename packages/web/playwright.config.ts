@@ -9,7 +9,8 @@ export default defineConfig({
   outputDir: 'test-results',
   timeout: 180_000,
   expect: { timeout: 15_000 },
-  workers: 1,
+  // One waits for the server while the other draws.
+  workers: 2,
   retries: 0,
   use: {
     baseURL: process.env['BOOKMATCH_E2E_ADDRESS'],

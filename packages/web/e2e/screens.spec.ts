@@ -6,10 +6,12 @@ import { shopRoot } from './support/people';
 import { lookAt, lookAtDialog, settled } from './support/screen-look';
 
 /** Below the shop; `{list}` stands for the id of that list's first row. */
-const OWNER = [
+const OFFICE = [
   ...['/today', '/leads', '/leads/board', '/leads/new', '/leads/{/leads}', '/leads/{/leads}/edit'],
   ...['/estimates', '/estimates/new', '/estimates/{/estimates?status=draft}'],
   ...['/estimates/{/estimates?status=accepted}', '/jobs', '/jobs/board', '/jobs/new', '/jobs/{/jobs}'],
+];
+const MONEY_AND_SHOP = [
   ...['/time', '/time/mine', '/time/entries', '/time/members/{/members}', '/invoices', '/invoices/aging'],
   ...['/invoices/payments', '/invoices/new', '/invoices/{/invoices?standing=draft}'],
   ...['/invoices/{/invoices?standing=draft}/edit', '/invoices/{/invoices?standing=paid}'],
@@ -27,12 +29,20 @@ const BOOKKEEPER = [
   '/settings/shop',
 ];
 const LEAD_HAND = ['/today', '/jobs', '/jobs/{/jobs}', '/time', '/time/entries', '/leads'];
-const CREW = ['/time/clock', '/time', '/jobs', '/jobs/{/jobs}', '/account'];
+const CREW = ['/time/clock', '/time', '/jobs', '/jobs/{/jobs}', '/account', '/invoices'];
 
-const ROLES = { Owner: OWNER, Bookkeeper: BOOKKEEPER, 'Lead hand': LEAD_HAND, Crew: CREW };
+const WALKS = [
+  ['Owner', 'from a lead to a job', OFFICE],
+  ['Owner', 'from time to the ledger', MONEY_AND_SHOP],
+  ['Bookkeeper', 'of their own', BOOKKEEPER],
+  ['Lead hand', 'of their own', LEAD_HAND],
+  ['Crew', 'of their own', CREW],
+] as const;
 
-for (const [role, screens] of Object.entries(ROLES)) {
-  test(`every screen of the ${role.toLowerCase()}`, async ({ page }) => {
+test.describe.configure({ mode: 'parallel' });
+
+for (const [role, part, screens] of WALKS) {
+  test(`the screens of the ${role.toLowerCase()}, ${part}`, async ({ page }) => {
     test.setTimeout(400_000);
     await signInAs(page, role);
     const trouble = troubleOn(page);
@@ -58,8 +68,20 @@ test('what opens over the screens', async ({ page }) => {
   expect(trouble).toEqual([]);
 });
 
+test('what stands behind a link of a screen, and the choice between shops', async ({ page }) => {
+  await signInAs(page, 'Bookkeeper');
+  const trouble = troubleOn(page);
+  await page.goto(shopRoot(page) + (await addressOf(page, '/estimates/{/estimates?status=accepted}')));
+  await page.getByRole('link', { name: 'Revision 1', exact: true }).click();
+  await expect(page).toHaveURL(/\/revisions\//);
+  await lookAt(page, 'one revision');
+  await page.goto('/');
+  await lookAt(page, 'the choice between shops');
+  expect(trouble).toEqual([]);
+});
+
 test('the pages outside of a shop', async ({ page }) => {
-  for (const screen of ['/sign-in', '/sign-up', '/forgot-password', '/nowhere']) {
+  for (const screen of OUTSIDE) {
     // Nobody is signed in, which the browser notes as a refusal.
     const trouble = troubleOn(page, { refused: true });
     await page.goto(screen);
@@ -80,6 +102,11 @@ test('what a customer sees behind a link', async ({ page, browser }) => {
   }
   expect(trouble).toEqual([]);
 });
+
+const OUTSIDE = [
+  ...['/sign-in', '/sign-up', '/forgot-password', '/reset-password?token=old', '/confirm-email?token=old'],
+  ...['/accept-invitation?token=old', '/c/old', '/nowhere'],
+];
 
 /** A screen, and the button on it that opens a dialog. */
 const DIALOGS = [

@@ -40,6 +40,16 @@ export async function settled(page: Page): Promise<void> {
 async function dress(page: Page, size: typeof DESK, colorScheme: 'light' | 'dark'): Promise<void> {
   await page.setViewportSize(size);
   await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' });
+  await page.evaluate(changesOfColor);
+}
+
+/** Colors fade into each other: what is measured half way is neither the one nor the other. */
+async function changesOfColor(): Promise<void> {
+  await new Promise((done) => requestAnimationFrame(() => requestAnimationFrame(done)));
+  const ending = document
+    .getAnimations()
+    .filter(({ effect }) => Number.isFinite(effect?.getComputedTiming().endTime));
+  await Promise.allSettled(ending.map(({ finished }) => finished));
 }
 
 async function expectNoSlide(page: Page, screen: string): Promise<void> {
